@@ -1,0 +1,24 @@
+package hemline.export;
+
+import hemline.geodesy.GeoPoint;
+import hemline.geodesy.LocalPlane;
+import hemline.geometry.Point;
+import hemline.sweep.RadarSite;
+import java.util.Optional;
+
+/** Latitude and longitude of places on the plane, or not available where the radar's own place is unknown. */
+final class Geolocation {
+    private final Optional<LocalPlane> plane;
+
+    Geolocation(RadarSite site) {
+        plane = site.position().map(LocalPlane::new);
+    }
+
+    Optional<GeoPoint> of(Point place) {
+        return plane.map(p -> p.toGeo(place));
+    }
+
+    boolean known() {
+        return plane.isPresent();
+    }
+}

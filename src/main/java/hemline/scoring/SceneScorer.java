@@ -26,8 +26,8 @@ final class SceneScorer {
     private final List<DecoyMap> decoys = new ArrayList<>();
     private final List<SweepPair.Matches> matches = new ArrayList<>();
 
-    private final double[] totalKm = new double[4];
-    private final double[] foundKm = new double[4];
+    private final double[] totalKm = new double[SceneTally.STRENGTH_CLASSES];
+    private final double[] foundKm = new double[SceneTally.STRENGTH_CLASSES];
     private final double[] trackKm;
     private final double[] trackNeitherKm;
     private final double[] trackSpeedKm;
@@ -180,6 +180,17 @@ final class SceneScorer {
         }
         int track = pair.found.owner(e);
         trackSpeedKm[track] += km;
+        double error = speedErrorMs(pair, truthElement, vertex);
+        if (!Double.isNaN(error)) {
+            speed.add(error, vertex.speed().sdMs(), km);
+            if (tracks.get(track).sweepCount() >= LONG_TRACK_SWEEPS) {
+                speedLong.add(error, vertex.speed().sdMs(), km);
+            }
+        }
+    }
+
+    /** Found velocity along the true normal less the true normal speed, m s⁻¹; NaN where the truth states no speed. */
+    private static double speedErrorMs(SweepPair pair, int truthElement, TrackVertex vertex) {
         List<TruthVertex> vertices = pair.truthLines.get(pair.truth.line(truthElement)).vertices();
         int i = pair.truth.segment(truthElement);
         double share = pair.truth.share(truthElement);
@@ -188,11 +199,7 @@ final class SceneScorer {
         Point before = velocity(vertices.get(i).normalBearingDeg(), vertices.get(i).speedMs());
         Point after = velocity(vertices.get(i + 1).normalBearingDeg(), vertices.get(i + 1).speedMs());
         double trueMs = before.plus(after.minus(before).times(share)).dot(normal);
-        double foundMs = velocity(vertex.normalBearingDeg(), vertex.speed().speedMs()).dot(normal);
-        speed.add(foundMs - trueMs, vertex.speed().sdMs(), km);
-        if (tracks.get(track).sweepCount() >= LONG_TRACK_SWEEPS) {
-            speedLong.add(foundMs - trueMs, vertex.speed().sdMs(), km);
-        }
+        return velocity(vertex.normalBearingDeg(), vertex.speed().speedMs()).dot(normal) - trueMs;
     }
 
     private static Point velocity(double bearingDeg, double speedMs) {

@@ -29,9 +29,20 @@ record SceneTally(String scene, long seed, int sweeps, Recalled detectable, doub
                   List<BoundaryTally> boundaries, List<TrackTally> tracks, MeetingTally meetings,
                   ErrorSamples positionKm, ErrorSamples speedMs, ErrorSamples speedLongMs, ErrorSamples expansionMs,
                   List<String> cautions) {
+    static final int STRENGTH_CLASSES = 5;
 
-    /** Index of a strength class: below 4, 4 to 8, 8 to 14, 14 dBZ and more. */
+    /** The same with more to know about it. */
+    SceneTally withCautions(List<String> more) {
+        return new SceneTally(scene, seed, sweeps, detectable, rightKm, neitherKm, falseKm, falseKmByCause, decoyCauses,
+                boundaries, tracks, meetings, positionKm, speedMs, speedLongMs, expansionMs,
+                java.util.stream.Stream.concat(cautions.stream(), more.stream()).toList());
+    }
+
+    /** Index of a strength class: below 4, 4 to 8, 8 to 14, 14 dBZ and more, unknown. */
     static int strengthClass(double peakDbz) {
+        if (Double.isNaN(peakDbz)) {
+            return STRENGTH_CLASSES - 1;
+        }
         if (peakDbz < 4) {
             return 0;
         }

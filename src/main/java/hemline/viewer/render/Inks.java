@@ -1,0 +1,42 @@
+package hemline.viewer.render;
+
+import hemline.boundary.Track;
+import java.util.List;
+import javafx.scene.paint.Color;
+import javafx.scene.text.Font;
+import javafx.scene.text.FontWeight;
+
+/** Colours, line patterns and letters of everything drawn over a sweep. */
+public final class Inks {
+    /** Under a line, so that it shows on light echo as well as on dark. */
+    public static final Color CASING = Color.web("#05070c", 0.75);
+    /** Round the selected track. */
+    public static final Color SELECTED = Color.WHITE;
+    static final Color GRID = Color.web("#93a4b8", 0.42);
+    static final Color GRID_TEXT = Color.web("#c3cfdd");
+    static final Color CEILING = Color.web("#e9c46a", 0.75);
+    public static final Color MEETING = Color.web("#ffffff");
+    static final Color MEASURE = Color.web("#7dffce");
+    static final double[] SOLID = {};
+    /** A boundary drawn by hand. */
+    static final double[] HAND = {9, 5};
+    static final double[] ARC_FIT = {2, 5};
+    static final double[] FAINT = {3, 5};
+    static final Font LABEL = Font.font("System", FontWeight.BOLD, 12);
+    static final Font SMALL = Font.font("System", 11);
+    /** Warm and saturated, which the sweep's own colours are not; they differ in lightness too. */
+    private static final List<Color> TRACKS = List.of(Color.web("#ff9a1f"), Color.web("#ff4f9a"), Color.web("#ffe45c"),
+            Color.web("#ff5b3a"), Color.web("#d79bff"), Color.web("#ffc39a"));
+
+    private Inks() {
+    }
+
+    /** The colour of a track, by its place among the tracks. */
+    public static Color of(Track track, List<Track> among) {
+        return TRACKS.get(Math.floorMod(among.indexOf(track), TRACKS.size()));
+    }
+
+    static Color faded(Color colour, double opacity) {
+        return Color.color(colour.getRed(), colour.getGreen(), colour.getBlue(), opacity);
+    }
+}

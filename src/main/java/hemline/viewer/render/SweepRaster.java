@@ -1,0 +1,28 @@
+package hemline.viewer.render;
+
+import hemline.viewer.viewmodel.PlaneField;
+import hemline.viewer.viewmodel.ViewTransform;
+import java.nio.IntBuffer;
+import javafx.scene.image.Image;
+import javafx.scene.image.PixelBuffer;
+import javafx.scene.image.PixelFormat;
+import javafx.scene.image.WritableImage;
+
+/**
+ * A sweep drawn for one view.
+ *
+ * @param image the pixels
+ * @param view  the view they were drawn for
+ * @param index place of the sweep in the loop
+ * @param field what it shows
+ */
+public record SweepRaster(Image image, ViewTransform view, int index, PlaneField field) {
+
+    static SweepRaster draw(LevelGrid grid, PolarMap map, ViewTransform view, int index, PlaneField field) {
+        int[] argb = new int[map.width() * map.height()];
+        grid.paint(map, argb);
+        PixelBuffer<IntBuffer> pixels = new PixelBuffer<>(map.width(), map.height(), IntBuffer.wrap(argb),
+                PixelFormat.getIntArgbPreInstance());
+        return new SweepRaster(new WritableImage(pixels), view, index, field);
+    }
+}

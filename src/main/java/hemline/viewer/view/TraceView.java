@@ -1,0 +1,68 @@
+package hemline.viewer.view;
+
+import hemline.boundary.Track;
+import hemline.viewer.render.Chrome;
+import hemline.viewer.render.Inks;
+import hemline.viewer.render.TracePainter;
+import hemline.viewer.viewmodel.TimeScale;
+import hemline.viewer.viewmodel.Trace;
+import hemline.viewer.viewmodel.ViewerModel;
+import java.util.Optional;
+import javafx.scene.AccessibleRole;
+
+/** One trace of the selected track; hover reads it out, a click goes to that sweep. */
+final class TraceView extends CanvasRegion {
+    private final ViewerModel model;
+    private final TracePainter painter = new TracePainter();
+    private Track track;
+    private Trace trace;
+    private Optional<Trace.Sample> hovered = Optional.empty();
+
+    TraceView(ViewerModel model) {
+        this.model = model;
+        setMinHeight(70);
+        setPrefHeight(96);
+        setAccessibleRole(AccessibleRole.IMAGE_VIEW);
+        redraw().on(model.loop().indexProperty(), model.settings().darkProperty());
+        setOnMouseMoved(e -> hover(e.getX()));
+        setOnMouseExited(e -> {
+            hovered = Optional.empty();
+            redraw().request();
+        });
+        setOnMouseClicked(e -> hovered.ifPresent(sample -> model.loop().show(sample.sweep())));
+    }
+
+    void show(Track newTrack, Trace newTrace) {
+        track = newTrack;
+        trace = newTrace;
+        hovered = Optional.empty();
+        setId("trace-" + trace.name().toLowerCase(java.util.Locale.ROOT).replace(' ', '-'));
+        setAccessibleText(trace.name() + " of " + track.id() + ": " + (trace.samples().isEmpty() ? trace.none()
+                : trace.words(trace.samples().get(0)) + " to " + trace.words(trace.samples().get(trace.samples().size() - 1))));
+        javafx.scene.control.Tooltip.install(this, new javafx.scene.control.Tooltip(trace.about()));
+        redraw().request();
+    }
+
+    private TimeScale time() {
+        long from = track.firstMs();
+        return new TimeScale(from, Math.max(from + 60_000, track.lastMs()), TracePainter.LEFT_PX + 6,
+                Math.max(TracePainter.LEFT_PX + 7, getWidth() - TracePainter.RIGHT_PX - 6));
+    }
+
+    private void hover(double x) {
+        if (trace != null) {
+            hovered = trace.nearest(time().timeMs(x));
+            redraw().request();
+        }
+    }
+
+    @Override
+    void paint() {
+        if (trace != null && model.session() != null) {
+            painter.paint(canvas().getGraphicsContext2D(), trace, time(),
+                    model.session().frames().get(model.loop().index()).meanTimeMs(), hovered,
+                    Inks.of(track, model.session().tracks()), Chrome.of(model.settings().darkProperty().get()),
+                    getWidth(), getHeight());
+        }
+    }
+}

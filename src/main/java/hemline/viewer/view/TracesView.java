@@ -1,0 +1,60 @@
+package hemline.viewer.view;
+
+import hemline.boundary.Track;
+import hemline.viewer.viewmodel.Trace;
+import hemline.viewer.viewmodel.Traces;
+import hemline.viewer.viewmodel.ViewerModel;
+import hemline.viewer.viewmodel.Words;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Stream;
+import javafx.scene.control.Label;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
+
+/** Speed, radius, length and reflectivity of the selected track against time. */
+final class TracesView extends StackPane {
+    private final ViewerModel model;
+    private final Label heading = new Label();
+    private final Label hint = new Label("Select a track on the plane, the rail or in the ledger to see its speed,"
+            + " radius, length and reflectivity against time.");
+    private final List<TraceView> views;
+    private final VBox column;
+
+    TracesView(ViewerModel model) {
+        this.model = model;
+        getStyleClass().add("traces");
+        setId("traces");
+        views = Stream.generate(() -> new TraceView(model)).limit(4).toList();
+        column = new VBox(heading);
+        column.getChildren().addAll(views);
+        views.forEach(view -> VBox.setVgrow(view, Priority.ALWAYS));
+        heading.setId("traces-heading");
+        heading.getStyleClass().add("traces-heading");
+        hint.setWrapText(true);
+        hint.setId("traces-hint");
+        hint.getStyleClass().add("muted");
+        getChildren().addAll(column, hint);
+        setMinSize(0, 0);
+        new Redraw(this::say).on(model.selection().trackProperty(), model.sessionProperty());
+        say();
+    }
+
+    private void say() {
+        Optional<Track> track = model.track(model.selection().track());
+        column.setVisible(track.isPresent());
+        hint.setVisible(track.isEmpty());
+        track.ifPresent(this::show);
+    }
+
+    private void show(Track track) {
+        String arc = track.arc().map(a -> ", expanding " + Words.speed(a.expansion())).orElse("");
+        heading.setText(track.id() + " toward " + Words.bearing(track.bearingDeg()) + " at " + Words.speed(track.speed())
+                + arc + "  (\u00b1 2 sd)");
+        List<Trace> traces = Traces.of(track);
+        for (int i = 0; i < views.size(); i++) {
+            views.get(i).show(track, traces.get(i));
+        }
+    }
+}

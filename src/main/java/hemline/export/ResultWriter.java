@@ -1,0 +1,70 @@
+package hemline.export;
+
+import java.awt.image.BufferedImage;
+import java.io.IOException;
+import java.io.OutputStreamWriter;
+import java.io.Writer;
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.List;
+import javax.imageio.ImageIO;
+import javax.imageio.stream.MemoryCacheImageOutputStream;
+
+/**
+ * Writes the results of a run into a folder: {@link #tables}, any {@link #picture}, and last {@link #finish} with
+ * {@code run.json}, at which all of them appear.
+ */
+public final class ResultWriter {
+    /** Name of the record of the run; it appears last, so where it stands with right check sums, all is there. */
+    public static final String RUN = "run.json";
+
+    private final ResultFolder folder;
+
+    public ResultWriter(ResultFolder folder) {
+        this.folder = folder;
+    }
+
+    /** The tables and the GeoJSON. */
+    public void tables(RunRecord run) throws IOException {
+        Geolocation where = new Geolocation(run.analysis().site());
+        table(BoundariesTable.TABLE, BoundariesTable.rows(run.analysis().tracks(), where));
+        table(TracksTable.TABLE, run.analysis().tracks());
+        table(MeetingsTable.TABLE, MeetingsTable.rows(run.analysis().meetings(), where));
+        folder.stage("boundaries.geojson", out -> BoundariesGeoJson.write(out, run.analysis(), where));
+    }
+
+    /** One picture as PNG. */
+    public void picture(String name, BufferedImage picture) throws IOException {
+        folder.stage(name, out -> {
+            try (MemoryCacheImageOutputStream image = new MemoryCacheImageOutputStream(out)) {
+                if (!ImageIO.write(picture, "png", image)) {
+                    throw new IllegalStateException("this Java platform cannot write PNG");
+                }
+            }
+        });
+    }
+
+    /**
+     * The record of the run; then everything appears in the folder.
+     *
+     * @return names of all results, {@code run.json} last
+     */
+    public List<String> finish(RunRecord run) throws IOException {
+        List<ResultSum> sums = new ArrayList<>();
+        for (String name : folder.staged()) {
+            sums.add(ResultSum.of(name, folder.stagedFile(name)));
+        }
+        folder.stage(RUN, out -> Json.write(RunJson.of(run, sums), out));
+        List<String> names = folder.staged();
+        folder.publish();
+        return names;
+    }
+
+    private <R> void table(Table<R> table, List<R> rows) throws IOException {
+        folder.stage(table.name() + ".csv", out -> {
+            Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
+            table.write(writer, rows);
+            writer.flush();
+        });
+    }
+}

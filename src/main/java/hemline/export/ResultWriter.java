@@ -24,12 +24,13 @@ public final class ResultWriter {
         this.folder = folder;
     }
 
-    /** The tables and the GeoJSON. */
+    /** The tables with what explains them, and the GeoJSON. */
     public void tables(RunRecord run) throws IOException {
         Geolocation where = new Geolocation(run.analysis().site());
         table(BoundariesTable.TABLE, BoundariesTable.rows(run.analysis().tracks(), where));
         table(TracksTable.TABLE, run.analysis().tracks());
         table(MeetingsTable.TABLE, MeetingsTable.rows(run.analysis().meetings(), where));
+        folder.stage("datapackage.json", out -> Json.write(DataPackage.describe(), out));
         folder.stage("boundaries.geojson", out -> BoundariesGeoJson.write(out, run.analysis(), where));
     }
 

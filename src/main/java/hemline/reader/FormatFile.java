@@ -1,0 +1,28 @@
+package hemline.reader;
+
+import hemline.sweep.RadarSite;
+import java.util.List;
+
+/** An opened file of one format: what it holds, and the values of one field of one sweep at a time. */
+interface FormatFile extends AutoCloseable {
+    /** Format and version in words, for example {@code ODIM_H5 2.2 PVOL}. */
+    String format();
+
+    RadarSite site();
+
+    List<SweepHead> sweeps();
+
+    /** What had to be assumed about the file as a whole. */
+    List<String> notes();
+
+    /**
+     * Values {@code [ray][gate]} in the order of the file; NaN not measured, −∞ below detection.
+     *
+     * @param sweep index into {@link #sweeps()}
+     * @param field one of that sweep's fields
+     */
+    float[] values(int sweep, FieldHead field) throws UnreadableFileException;
+
+    @Override
+    void close();
+}

@@ -9,7 +9,7 @@ import org.assertj.core.data.Offset;
 import org.junit.jupiter.api.Test;
 
 class CircleFitsTest {
-    private static final List<Point> SIX = List.of(new Point(1, 7), new Point(2, 6), new Point(5, 8), new Point(7, 7),
+    static final List<Point> SIX = List.of(new Point(1, 7), new Point(2, 6), new Point(5, 8), new Point(7, 7),
             new Point(9, 5), new Point(3, 7));
 
     /** Gander, Golub and Strebel (1994), BIT 34:558, their six points; digits from N. Chernov's test text. */

@@ -9,26 +9,26 @@ import org.junit.jupiter.api.Test;
 
 /** Fits against certified values of the NIST Statistical Reference Datasets (StRD). */
 class FitsTest {
-    private static final double[] NORRIS_X = {
+    static final double[] NORRIS_X = {
         0.2, 337.4, 118.2, 884.6, 10.1, 226.5, 666.3, 996.3, 448.6, 777.0, 558.2, 0.4,
         0.6, 775.5, 666.9, 338.0, 447.5, 11.6, 556.0, 228.1, 995.8, 887.6, 120.2, 0.3,
         0.3, 556.8, 339.1, 887.2, 999.0, 779.0, 11.1, 118.3, 229.2, 669.1, 448.9, 0.5
     };
-    private static final double[] NORRIS_Y = {
+    static final double[] NORRIS_Y = {
         0.1, 338.8, 118.1, 888.0, 9.2, 228.1, 668.5, 998.5, 449.1, 778.9, 559.2, 0.3,
         0.1, 778.1, 668.8, 339.3, 448.9, 10.8, 557.7, 228.3, 998.0, 888.8, 119.6, 0.3,
         0.6, 557.6, 339.3, 888.0, 998.5, 778.9, 10.2, 117.6, 228.9, 668.4, 449.2, 0.2
     };
-    private static final double[] MISRA_X = {
+    static final double[] MISRA_X = {
         77.6, 114.9, 141.1, 190.8, 239.9, 289.0, 332.8, 378.4, 434.8, 477.3, 536.8, 593.1,
         689.1, 760.0
     };
-    private static final double[] MISRA_Y = {
+    static final double[] MISRA_Y = {
         10.07, 14.73, 17.94, 23.93, 29.61, 35.18, 40.02, 44.82, 50.76, 55.05, 61.01, 66.40,
         75.47, 81.78
     };
     /** Columns: deflator, national product, unemployed, armed forces, population, year; then total employment. */
-    private static final double[][] LONGLEY = {
+    static final double[][] LONGLEY = {
         {83.0, 234289, 2356, 1590, 107608, 1947, 60323}, {88.5, 259426, 2325, 1456, 108632, 1948, 61122},
         {88.2, 258054, 3682, 1616, 109773, 1949, 60171}, {89.5, 284599, 3351, 1650, 110929, 1950, 61187},
         {96.2, 328975, 2099, 3099, 112075, 1951, 63221}, {98.1, 346999, 1932, 3594, 113270, 1952, 63639},
@@ -39,7 +39,7 @@ class FitsTest {
         {115.7, 518173, 4806, 2572, 127852, 1961, 69331}, {116.9, 554894, 4007, 2827, 130081, 1962, 70551}
     };
 
-    private static double[][] withOnes(double[] x) {
+    static double[][] withOnes(double[] x) {
         double[][] design = new double[x.length][];
         for (int i = 0; i < x.length; i++) {
             design[i] = new double[] {1, x[i]};

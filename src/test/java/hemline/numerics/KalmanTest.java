@@ -14,10 +14,10 @@ class KalmanTest {
     private static final double H = 15099;
     private static final double Q = 1469.1;
 
-    private record Run(List<RtsSmoother.Step> steps, double logLikelihood, double firstTerm) {
+    record Run(List<RtsSmoother.Step> steps, double logLikelihood, double firstTerm) {
     }
 
-    private static Run localLevel(double startVariance) {
+    static Run localLevel(double startVariance) {
         Gaussian state = new Gaussian(new double[] {0}, new double[][] {{startVariance}});
         List<RtsSmoother.Step> steps = new ArrayList<>();
         double sum = 0;

@@ -8,7 +8,13 @@ interface FormatFile extends AutoCloseable {
     /** Format and version in words, for example {@code ODIM_H5 2.2 PVOL}. */
     String format();
 
+    /** The radar as the file states it. */
     RadarSite site();
+
+    /** Height of the antenna above the altitude that {@link #site()} states, m; 0 where that is the antenna's. */
+    default double antennaAboveSiteM() {
+        return 0;
+    }
 
     List<SweepHead> sweeps();
 

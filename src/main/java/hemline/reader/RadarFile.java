@@ -30,7 +30,8 @@ public final class RadarFile implements AutoCloseable {
         for (SweepHead head : format.sweeps()) {
             sweeps.add(facts(sweeps.size(), head));
         }
-        return new RadarFileFacts(file.path(), format.format(), format.site(), sweeps, format.notes());
+        return new RadarFileFacts(file.path(), format.format(), format.site(), format.antennaAboveSiteM(),
+                sweeps, format.notes());
     }
 
     private static SweepFacts facts(int index, SweepHead head) {
@@ -72,14 +73,14 @@ public final class RadarFile implements AutoCloseable {
                 choice));
         SweepAssembly.Stored stored = stored(cut.reflectivity(), reflectivity);
         if (donorSweep < 0) {
-            return SweepAssembly.assemble(head, source(cut.reflectivity()), format.site(), stored, Optional.empty(),
+            return SweepAssembly.assemble(head, source(cut.reflectivity()), site(), stored, Optional.empty(),
                     head.nyquistMs());
         }
         SweepHead other = donor.head(donorSweep);
         Optional<FieldHead> velocity = FieldChooser.velocity(other.fields());
         Optional<SweepAssembly.Stored> speed = velocity.isPresent()
                 ? Optional.of(donor.stored(donorSweep, velocity.get())) : Optional.empty();
-        return SweepAssembly.assemble(head, source(cut.reflectivity()), format.site(), stored, speed,
+        return SweepAssembly.assemble(head, source(cut.reflectivity()), site(), stored, speed,
                 other.nyquistMs());
     }
 
@@ -113,8 +114,10 @@ public final class RadarFile implements AutoCloseable {
         return sweeps.get(sweep);
     }
 
+    /** The radar with its antenna's altitude. */
     RadarSite site() {
-        return format.site();
+        RadarSite stated = format.site();
+        return new RadarSite(stated.name(), stated.position(), stated.altitudeM() + format.antennaAboveSiteM());
     }
 
     List<String> notes() {

@@ -26,6 +26,8 @@ public final class RadarFiles {
                 return arrays(file, Hdf5File.open(file, content.buffer()));
             case NETCDF_CLASSIC:
                 return arrays(file, ClassicFile.open(file, content.bytes()));
+            case LEVEL_II:
+                return Level2File.open(file, content);
             case EMPTY:
                 throw file.fault("", "is empty", "fetch or copy the file again");
             case TEXT:

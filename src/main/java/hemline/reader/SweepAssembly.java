@@ -99,7 +99,7 @@ final class SweepAssembly {
             for (int g = 0; g < gate.length; g++) {
                 if (gate[g] >= 0) {
                     float value = velocity.values[stored * own.gates() + gate[g]];
-                    values[ray * gate.length + g] = (float) (sign * value);
+                    values[ray * gate.length + g] = Field.isEcho(value) ? (float) (sign * value) : value;
                 }
             }
         }

@@ -26,6 +26,7 @@ class RealLoopsTest {
         "reject/example_cfradial_rhi.nc | RHI scan",
         "reject/composite_swe_gmap.h5 | COMP object, which holds no sweep",
         "reject/CORRUPT_sekkr_scan_0.5_pn282_20180405T102500Z_0x9.h5 | every gate of DBZH is no-data",
+        "reject/KBMX20160509_093623_V06.gz | holds no radial",
     })
     void unusableFileIsRefusedInOneClearLine(String name, String reason) {
         OpenedLoop opened = open(name);

@@ -22,7 +22,6 @@ class RealSweepsTest {
 
     static Stream<Named<Map<String, String>>> readable() throws IOException {
         return RealSweeps.expected().stream().filter(row -> !row.get("file").startsWith("reject/"))
-                .filter(row -> !row.get("format").startsWith("Level II"))
                 .map(row -> Named.of(row.get("file"), row));
     }
 
@@ -50,6 +49,10 @@ class RealSweepsTest {
 
             TreeSet<String> names = new TreeSet<>();
             facts.sweeps().forEach(sweep -> sweep.fields().forEach(field -> names.add(field.name())));
+            if (row.get("format").contains("msg1")) {
+                // The table's decoder of message 1 left the spectrum width out.
+                names.remove("SW");
+            }
             assertThat(names).isEqualTo(new TreeSet<>(List.of(row.get("fields").split(","))));
         }
     }

@@ -9,6 +9,7 @@ import hemline.sweep.SweepFrame;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 
 /** Links the boundaries of all sweeps of a loop into tracks. */
 public final class Tracking {
@@ -39,25 +40,49 @@ public final class Tracking {
         progress.check();
         List<Piece> pieces = PieceCutter.cut(cloud, motion);
         List<PieceLinks.Link> links = new PieceLinks(cloud, motion, cells, pieces, settings).links(pieces);
-        List<List<Integer>> groups = new Grouping(LEAST_SHARE, (a, b) -> true).group(pieces, links);
+        GroupArcs arcs = new GroupArcs(cloud, motion, pieces);
+        List<List<Integer>> groups = arcs.joinSiblings(new Grouping(LEAST_SHARE, arcs::mayJoin).group(pieces, links));
         progress.step("linking", 2, 3);
         progress.check();
         TrackBuilder builder = new TrackBuilder(cloud, motion, frames);
-        List<Track> kept = new ArrayList<>();
+        List<Draft> drafts = new ArrayList<>();
         for (List<Integer> group : groups) {
             TrackQuality quality = TrackQuality.of(group, pieces, cloud, motion);
             if (quality.keep(settings)) {
-                List<TrackPiece> stretches = builder.stretches(group, pieces);
-                kept.add(Track.linked("-", stretches, quality.score()));
+                drafts.add(new Draft(builder.strands(group, pieces), cloud.sweeps, quality.score()));
             }
         }
-        kept.sort(Comparator.comparingDouble(Track::score).reversed().thenComparingLong(Track::firstMs));
-        List<Track> named = new ArrayList<>(kept.size());
-        for (int i = 0; i < kept.size(); i++) {
-            named.add(Track.linked(String.format(java.util.Locale.ROOT, "T%02d", i + 1), kept.get(i).pieces(),
-                    kept.get(i).score()));
-        }
+        List<Track> named = name(finish(drafts, frames, cloud.originMs, settings), builder);
         progress.step("linking", 3, 3);
+        return named;
+    }
+
+    private static List<Draft> finish(List<Draft> drafts, List<SweepFrame> frames, long originMs,
+                                      TrackingSettings settings) {
+        drafts.sort(Comparator.comparingDouble((Draft d) -> d.score).reversed().thenComparingInt(Draft::firstSweep));
+        OnePlace.enforce(drafts);
+        GapFiller filler = new GapFiller(frames, originMs);
+        EndBridger bridger = new EndBridger(frames, originMs, settings.maxBridgeKm());
+        for (Draft draft : drafts) {
+            PositionSmoother.smooth(draft);
+            filler.fill(draft);
+            bridger.bridge(draft);
+            draft.sort();
+        }
+        OnePlace.enforce(drafts);
+        drafts.removeIf(draft -> draft.sweepsSeen() < settings.minSweeps()
+                || draft.maxLengthKm() < settings.minLengthKm());
+        return drafts;
+    }
+
+    private static List<Track> name(List<Draft> drafts, TrackBuilder builder) {
+        List<Track> named = new ArrayList<>();
+        for (Draft draft : drafts) {
+            List<TrackPiece> stretches = builder.stretches(draft);
+            if (!stretches.isEmpty()) {
+                named.add(Track.linked(String.format(Locale.ROOT, "T%02d", named.size() + 1), stretches, draft.score));
+            }
+        }
         return named;
     }
 }

@@ -134,7 +134,7 @@ class KalmanTest {
             nis += found.meanNis() / 40;
             for (int k = 0; k < 20; k++) {
                 raw += Double.isNaN(seen[k]) ? 0 : Math.pow(seen[k] - truth[k], 2);
-                smooth += Math.pow(found.states().get(k).mean()[0] - truth[k], 2);
+                smooth += Math.pow(found.position(k) - truth[k], 2);
             }
         }
         assertThat(smooth).isLessThan(0.6 * raw);
@@ -152,11 +152,40 @@ class KalmanTest {
             backTime[k] = 4.2 - time[4 - k];
             backSeen[k] = seen[4 - k];
         }
-        List<Gaussian> forward = ConstantVelocity.smooth(time, seen, sd, 0.1, 0, 20).states();
-        List<Gaussian> backward = ConstantVelocity.smooth(backTime, backSeen, sd, 0.1, 0, 20).states();
+        ConstantVelocity.Smoothed forward = ConstantVelocity.smooth(time, seen, sd, 0.1, 0, 20);
+        ConstantVelocity.Smoothed backward = ConstantVelocity.smooth(backTime, backSeen, sd, 0.1, 0, 20);
         for (int k = 0; k < 5; k++) {
-            assertThat(backward.get(4 - k).mean()[0]).isCloseTo(forward.get(k).mean()[0], Offset.offset(0.02));
-            assertThat(backward.get(4 - k).mean()[1]).isCloseTo(-forward.get(k).mean()[1], Offset.offset(0.02));
+            assertThat(backward.position(4 - k)).isCloseTo(forward.position(k), Offset.offset(0.02));
+            assertThat(backward.speed(4 - k)).isCloseTo(-forward.speed(k), Offset.offset(0.02));
+        }
+    }
+
+    @Test
+    void theWrittenOutSmootherIsTheGeneralOne() {
+        double[] time = {0, 1, 2.5, 3, 4.2};
+        double[] seen = {0.4, 1.2, Double.NaN, 3.1, 4};
+        double q = 0.3;
+        Gaussian state = new Gaussian(new double[] {0.4, 2}, new double[][] {{9e4, 0}, {0, 25}});
+        List<RtsSmoother.Step> steps = new ArrayList<>();
+        for (int k = 0; k < 5; k++) {
+            double t = k == 0 ? 0 : time[k] - time[k - 1];
+            double[][] f = {{1, t}, {0, 1}};
+            Gaussian predicted = k == 0 ? state : KalmanFilter.predict(state, f,
+                    new double[][] {{q * t * t * t / 3, q * t * t / 2}, {q * t * t / 2, q * t}});
+            state = Double.isNaN(seen[k]) ? predicted : KalmanFilter.update(predicted, new double[][] {{1, 0}},
+                    new double[][] {{0.09}}, new double[] {seen[k]}).state();
+            steps.add(new RtsSmoother.Step(predicted, state, f));
+        }
+        List<Gaussian> general = RtsSmoother.smooth(steps);
+        double[] sd = {0.3, 0.3, 0.3, 0.3, 0.3};
+        ConstantVelocity.Smoothed written = ConstantVelocity.smooth(time, seen, sd, q, 2, 5);
+        for (int k = 0; k < 5; k++) {
+            assertThat(written.position(k)).isCloseTo(general.get(k).mean()[0], Offset.offset(1e-6));
+            assertThat(written.speed(k)).isCloseTo(general.get(k).mean()[1], Offset.offset(1e-6));
+            assertThat(written.positionSd(k)).isCloseTo(Math.sqrt(general.get(k).covariance()[0][0]),
+                    Offset.offset(1e-6));
+            assertThat(written.speedSd(k)).isCloseTo(Math.sqrt(general.get(k).covariance()[1][1]),
+                    Offset.offset(1e-6));
         }
     }
 }

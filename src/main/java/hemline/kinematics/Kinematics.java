@@ -8,6 +8,9 @@ import java.util.List;
 
 /** Measures how tracks move: normal speeds with their uncertainty, the track's own speed, its arc through time. */
 public final class Kinematics {
+    /** Sweep intervals on either side that a speed is fitted over at least. */
+    private static final double LEAST_INTERVALS = 1.3;
+
     private Kinematics() {
     }
 
@@ -21,7 +24,7 @@ public final class Kinematics {
             return List.of();
         }
         long originMs = frames.get(0).meanTimeMs();
-        double span = Math.max(settings.halfSpanS(), 2.2 * intervalS(frames));
+        double span = LEAST_INTERVALS * intervalS(frames);
         TrackPoints[] points = tracks.stream().map(t -> new TrackPoints(t, originMs)).toArray(TrackPoints[]::new);
         OpposedLines opposed = new OpposedLines(points, settings.opposedKm());
         List<Track> measured = new ArrayList<>(tracks.size());
@@ -31,9 +34,9 @@ public final class Kinematics {
         return measured;
     }
 
-    private static Track measure(Track track, TrackPoints points, int number, OpposedLines opposed, double halfSpanS,
+    private static Track measure(Track track, TrackPoints points, int number, OpposedLines opposed, double leastSpanS,
                                  long originMs, KinematicsSettings settings) {
-        LocalMotion local = new LocalMotion(points, settings.halfLengthKm(), halfSpanS);
+        LocalMotion local = new LocalMotion(points, settings.halfLengthKm(), settings.halfSpanS(), leastSpanS);
         VertexMotion[] motion = new VertexMotion[points.size];
         double sum = 0;
         int known = 0;

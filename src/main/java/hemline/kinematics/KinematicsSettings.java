@@ -4,7 +4,7 @@ package hemline.kinematics;
  * How motion is measured.
  *
  * @param halfLengthKm    half length along the line over which one speed is fitted, km
- * @param halfSpanS       half span of time over which one speed is fitted, s; at least 2.2 sweep intervals are taken
+ * @param halfSpanS       half span of time over which one speed is fitted, s; less for a fast line, more for rare sweeps
  * @param opposedKm       distance from another track's opposed line within which no speed is given, km
  * @param maxRelativeRadiusSd largest standard deviation of a radius, as a share of it, at which an arc is reported
  */
@@ -26,7 +26,7 @@ public record KinematicsSettings(double halfLengthKm, double halfSpanS, double o
     }
 
     public static KinematicsSettings defaults() {
-        return new KinematicsSettings(6, 700, 5, 0.3);
+        return new KinematicsSettings(6, 900, 5, 0.3);
     }
 
     public KinematicsSettings withHalfLengthKm(double km) {

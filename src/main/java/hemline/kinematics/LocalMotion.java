@@ -11,7 +11,9 @@ import java.util.Arrays;
  * component, can be told from a line's motion (the aperture problem).
  */
 final class LocalMotion {
-    private static final int UNKNOWNS = 5;
+    private static final int UNKNOWNS = 7;
+    /** A line that has gone farther than this is another line, bent otherwise, km. */
+    private static final double LONGEST_PATH_KM = 12;
     private static final double MAX_SPEED_MS = 35;
     /** Cosine of the largest turn between a vertex's normal and those it is compared with. */
     private static final double TURN_COS = Math.cos(Math.toRadians(40));
@@ -19,12 +21,18 @@ final class LocalMotion {
     private static final double[] SCALES_KM = {2, 1, 0.6, 0.6};
     /** Position error that neighbours in one sweep share, km. */
     private static final double SHARED_KM = 0.3;
+    /** Neighbouring vertices that share one error. */
+    private static final double CORRELATED = 5;
+    /** Sweeps' worth of trust in the shared error against the residuals. */
+    private static final double PRIOR_SWEEPS = 3;
     /** Speed error that no number of sweeps removes: bends, unsteadiness, m s⁻¹. */
-    private static final double FLOOR_MS = 0.3;
+    private static final double FLOOR_MS = 0.15;
 
     private final TrackPoints points;
     private final double halfLengthKm;
     private final double halfSpanS;
+    private final double leastSpanS;
+    private double spanS;
     private final NormalEquations equations = new NormalEquations(UNKNOWNS);
     private final double[] solved = new double[UNKNOWNS];
     private final double[][] covariance = new double[UNKNOWNS][UNKNOWNS];
@@ -35,10 +43,16 @@ final class LocalMotion {
     private int[] sweepOf = new int[256];
     private int count;
 
-    LocalMotion(TrackPoints points, double halfLengthKm, double halfSpanS) {
+    /**
+     * @param halfLengthKm half length along the line that is taken
+     * @param halfSpanS    half span of time that is taken for a line at rest
+     * @param leastSpanS   half span below which a fast line's is not cut
+     */
+    LocalMotion(TrackPoints points, double halfLengthKm, double halfSpanS, double leastSpanS) {
         this.points = points;
         this.halfLengthKm = halfLengthKm;
-        this.halfSpanS = halfSpanS;
+        this.halfSpanS = Math.max(halfSpanS, leastSpanS);
+        this.leastSpanS = leastSpanS;
     }
 
     /**
@@ -51,6 +65,21 @@ final class LocalMotion {
 
     /** The motion at a vertex; null when fewer than two sweeps show the line there. */
     Local at(int i) {
+        spanS = halfSpanS;
+        Local wide = fit(i);
+        if (wide == null) {
+            return null;
+        }
+        double fitting = Math.max(leastSpanS, Math.min(halfSpanS, 1000 * LONGEST_PATH_KM / Math.abs(wide.speedMs())));
+        if (fitting > 0.9 * halfSpanS) {
+            return wide;
+        }
+        spanS = fitting;
+        Local narrow = fit(i);
+        return narrow == null ? wide : narrow;
+    }
+
+    private Local fit(int i) {
         gather(i);
         if (!spread()) {
             return null;
@@ -60,11 +89,13 @@ final class LocalMotion {
             equations.clear();
             for (int j = 0; j < count; j++) {
                 double r = pass == 0 ? 0 : residual(j);
-                equations.add(row(j), d[j], w[j] * Robust.cauchy(r, SCALES_KM[pass]) / (SHARED_KM * SHARED_KM));
+                equations.add(row(j), d[j], w[j] * Robust.cauchy(r, SCALES_KM[pass]) / (CORRELATED * square(SHARED_KM)));
             }
             equations.prior(2, 0, 4);
             equations.prior(3, 0, 400);
             equations.prior(4, 0, 4);
+            equations.prior(5, 0, 1 / square(0.02));
+            equations.prior(6, 0, 1 / square(0.7));
             if (!equations.solve(solved, covariance)) {
                 return null;
             }
@@ -80,7 +111,13 @@ final class LocalMotion {
         row[2] = s[j];
         row[3] = s[j] * s[j];
         row[4] = s[j] * t[j];
+        row[5] = s[j] * s[j] * t[j];
+        row[6] = t[j] * t[j];
         return row;
+    }
+
+    private static double square(double value) {
+        return value * value;
     }
 
     private double residual(int j) {
@@ -98,7 +135,7 @@ final class LocalMotion {
         double ny = points.normalY[i];
         for (int g = 0; g < points.gridCount(); g++) {
             double span = points.gridTimeS(g) - points.timeS[i];
-            if (Math.abs(span) > halfSpanS + 60) {
+            if (Math.abs(span) > spanS + 60) {
                 continue;
             }
             double reach = Math.hypot(halfLengthKm, MAX_SPEED_MS * Math.abs(span) / 1000 + 2);
@@ -108,7 +145,7 @@ final class LocalMotion {
                 double along = -dx * ny + dy * nx;
                 double turn = nx * points.normalX[j] + ny * points.normalY[j];
                 double time = (points.timeS[j] - points.timeS[i]) / 1000;
-                if (Math.abs(along) <= halfLengthKm && turn > TURN_COS && Math.abs(time) * 1000 <= halfSpanS) {
+                if (Math.abs(along) <= halfLengthKm && turn > TURN_COS && Math.abs(time) * 1000 <= spanS) {
                     double off = dx * nx + dy * ny;
                     if (Math.abs(off) <= MAX_SPEED_MS * Math.abs(time) + 2) {
                         add(along, time, off, Math.exp(-Math.abs(along) / halfLengthKm) * (points.seen[j] ? 1 : 0.3),
@@ -145,39 +182,31 @@ final class LocalMotion {
         return false;
     }
 
-    /** Each sweep counts as one observation of the line, its error shared by the sweep's vertices. */
+    /**
+     * From the covariance of the fit, which knows how far the line had to be carried on beyond its ends, scaled by how
+     * well the sweeps agree with it.
+     */
     private double sd() {
-        double sumW = 0;
-        double sumT = 0;
-        double sumTT = 0;
         double residuals = 0;
-        int sweeps = 0;
+        double sweeps = 0;
         for (int j = 0; j < count; ) {
             int sweep = sweepOf[j];
             double weights = 0;
-            double time = 0;
             double off = 0;
             for (; j < count && sweepOf[j] == sweep; j++) {
                 double r = residual(j);
                 double weight = w[j] * Robust.cauchy(r, 0.6);
                 weights += weight;
-                time += weight * t[j];
                 off += weight * r;
             }
             if (weights > 1e-9) {
-                double share = Math.min(1, weights / 3);
-                time /= weights;
+                double share = Math.min(1, weights / CORRELATED);
                 off /= weights;
-                sumW += share;
-                sumT += share * time;
-                sumTT += share * time * time;
                 residuals += share * off * off;
-                sweeps++;
+                sweeps += share;
             }
         }
-        double spreadT = sumTT - sumT * sumT / sumW;
-        double free = Math.max(1, sweeps - 2);
-        double variance = (residuals + 3 * SHARED_KM * SHARED_KM) / (free + 3);
-        return Math.sqrt(FLOOR_MS * FLOOR_MS + variance / Math.max(1e-6, spreadT));
+        double ratio = (residuals / square(SHARED_KM) + PRIOR_SWEEPS) / (Math.max(0, sweeps - 2) + PRIOR_SWEEPS);
+        return Math.sqrt(square(FLOOR_MS) + ratio * covariance[1][1]);
     }
 }

@@ -14,12 +14,13 @@ import java.util.List;
  * @param crossDeg  angle between the lines there, degrees in [0, 90]
  * @param alongX    unit direction of the bisector of the lines, east
  * @param alongY    north
- * @param carriedKm length by which ends had to be carried on to come so near, km
+ * @param carrySdKm standard deviation of the gap from ends that had to be carried on, km
  */
 record Approach(double gapKm, double x, double y, double closingMs, double sdMs, double turnDeg, double crossDeg,
-                double alongX, double alongY, double carriedKm) {
-    /** Price of a carried end: a kilometre carried on counts as this much more of a gap, km. */
-    private static final double CARRY_PRICE = 0.1;
+                double alongX, double alongY, double carrySdKm) {
+    /** Standard deviation of where a line carried on beyond its end is: grows along it and with its square, km. */
+    private static final double CARRY_SD = 0.05;
+    private static final double CARRY_BEND_SD = 0.02;
 
     /** The nearest approach at a time, s; null when either side is empty. Lines that move alike do not count. */
     static Approach nearest(List<MovingLine> a, List<MovingLine> b, double atS, double minTurnDeg) {
@@ -35,8 +36,8 @@ record Approach(double gapKm, double x, double y, double closingMs, double sdMs,
                         double bx = second.x()[j] + second.velocityX()[j] * (atS - second.timeS()[j]) / 1000;
                         double by = second.y()[j] + second.velocityY()[j] * (atS - second.timeS()[j]) / 1000;
                         double gap = Math.hypot(bx - ax, by - ay);
-                        double carried = first.carriedKm()[i] + second.carriedKm()[j];
-                        double price = gap + CARRY_PRICE * carried;
+                        double carried = Math.hypot(carrySdKm(first.carriedKm()[i]), carrySdKm(second.carriedKm()[j]));
+                        double price = gap + carried;
                         if (price < bestPrice && turnCos(first, i, second, j) < cosTurn) {
                             bestPrice = price;
                             best = at(first, i, second, j, new double[] {ax, ay, bx, by}, carried);
@@ -46,6 +47,15 @@ record Approach(double gapKm, double x, double y, double closingMs, double sdMs,
             }
         }
         return best;
+    }
+
+    /** The same place with the closing speed of an earlier approach: once lines touch, theirs is muddled. */
+    Approach withClosing(Approach earlier) {
+        return new Approach(gapKm, x, y, earlier.closingMs, earlier.sdMs, turnDeg, crossDeg, alongX, alongY, carrySdKm);
+    }
+
+    private static double carrySdKm(double carriedKm) {
+        return CARRY_SD * carriedKm + CARRY_BEND_SD * carriedKm * carriedKm;
     }
 
     private static double turnCos(MovingLine a, int i, MovingLine b, int j) {

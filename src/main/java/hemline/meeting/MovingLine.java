@@ -33,8 +33,11 @@ record MovingLine(double[] x, double[] y, double[] timeS, double[] velocityX, do
         return new Point(x[i], y[i]);
     }
 
-    /** The stretch with both ends carried on by up to {@code extendKm}; unknown speeds are those of the nearest known. */
-    static MovingLine of(TrackPiece piece, long originMs, double extendKm, double fallbackMs) {
+    /**
+     * The stretch with both ends carried on by up to {@code extendKm}, along the track's arc where its radius is known
+     * (else NaN); unknown speeds are those of the nearest known.
+     */
+    static MovingLine of(TrackPiece piece, long originMs, double extendKm, double fallbackMs, double radiusKm) {
         List<double[]> rows = new ArrayList<>();
         for (TrackVertex vertex : piece.vertices()) {
             Point toward = Double.isNaN(vertex.normalBearingDeg()) ? new Point(0, 0)
@@ -44,8 +47,8 @@ record MovingLine(double[] x, double[] y, double[] timeS, double[] velocityX, do
                 (vertex.timeMs() - originMs) / 1000.0, toward.xKm(), toward.yKm(), speed, vertex.speed().sdMs(), 0});
         }
         fillSpeeds(rows, fallbackMs);
-        List<double[]> before = carryOn(rows, extendKm, true);
-        List<double[]> after = carryOn(rows, extendKm, false);
+        List<double[]> before = carryOn(rows, extendKm, true, radiusKm);
+        List<double[]> after = carryOn(rows, extendKm, false, radiusKm);
         java.util.Collections.reverse(before);
         List<double[]> all = new ArrayList<>(before);
         all.addAll(rows);
@@ -90,7 +93,8 @@ record MovingLine(double[] x, double[] y, double[] timeS, double[] velocityX, do
     }
 
     /** Steps of 1 km beyond an end along the circle of its last kilometres. */
-    private static List<double[]> carryOn(List<double[]> rows, double extendKm, boolean front) {
+    private static List<double[]> carryOn(List<double[]> rows, double extendKm, boolean front,
+                                          double radiusKm) {
         int n = rows.size();
         int end = front ? 0 : n - 1;
         int inward = front ? 1 : -1;
@@ -114,6 +118,12 @@ record MovingLine(double[] x, double[] y, double[] timeS, double[] velocityX, do
         if (beyond > 2 && near > 2) {
             double turn = Math.atan2(gx * fy - gy * fx, gx * fx + gy * fy);
             curvature = turn / (0.5 * (near + beyond));
+        }
+        if (!Double.isNaN(radiusKm)) {
+            // A grown arc bends away from where it moves; its radius is known better than a few kilometres tell.
+            double[] row = rows.get(end);
+            double side = fx * row[4] - fy * row[3];
+            curvature = (side > 0 ? -1 : 1) / radiusKm;
         }
         double heading = Math.atan2(fy, fx) + curvature * near / 2;
         double[] last = rows.get(end).clone();

@@ -31,53 +31,71 @@ final class ObservedMeetings {
     Optional<Meeting> of(Track a, Track b) {
         SortedMap<Integer, List<TrackPiece>> atA = a.bySweep();
         SortedMap<Integer, List<TrackPiece>> atB = b.bySweep();
-        double lastS = (frames.get(frames.size() - 1).meanTimeMs() - originMs) / 1000.0;
         Approach before = null;
+        double beforeS = Double.NaN;
+        double endS = timeS(frames.size() - 1);
         for (int k = 0; k < frames.size(); k++) {
             if (!atA.containsKey(k) || !atB.containsKey(k)) {
                 continue;
             }
-            double timeS = (frames.get(k).meanTimeMs() - originMs) / 1000.0;
-            double nextS = k + 1 < frames.size() ? (frames.get(k + 1).meanTimeMs() - originMs) / 1000.0 : lastS;
-            List<MovingLine> linesA = lines(atA.get(k), a);
-            List<MovingLine> linesB = lines(atB.get(k), b);
-            Approach now = Approach.nearest(linesA, linesB, timeS, settings.minCrossDeg());
+            Approach now = Approach.nearest(lines(atA.get(k), a), lines(atB.get(k), b), timeS(k),
+                    settings.minCrossDeg());
             if (now == null) {
                 continue;
             }
-            boolean touching = now.gapKm() <= settings.contactKm();
-            boolean both = atA.containsKey(k + 1) && atB.containsKey(k + 1);
-            double due = now.closingMs() > LEAST_CLOSING_MS ? 1000 * now.gapKm() / now.closingMs() : Double.NaN;
-            boolean dueSoon = due <= (both ? 0 : 1.2) * (nextS - timeS);
-            if (touching || dueSoon) {
-                if (touching && before == null && now.gapKm() < settings.contactKm() / 2) {
-                    return Optional.empty();
-                }
-                return Optional.of(meeting(a, b, now, timeS, lastS));
+            if (now.gapKm() + now.carrySdKm() <= settings.contactKm()) {
+                return before == null ? Optional.empty() : Optional.of(touched(a, b, before, beforeS, now, timeS(k)));
             }
             before = now;
+            beforeS = timeS(k);
         }
-        return Optional.empty();
+        if (before == null || before.closingMs() < LEAST_CLOSING_MS) {
+            return Optional.empty();
+        }
+        // One of the two ended; the gap may have closed before the next sweep that could show it.
+        double waitS = 1000 * before.gapKm() / before.closingMs();
+        double lastS = beforeS;
+        double nextS = frames.stream().mapToDouble(f -> timeS(f.index())).filter(t -> t > lastS).findFirst()
+                .orElse(endS);
+        return beforeS + waitS <= nextS + 0.2 * (nextS - beforeS)
+                ? Optional.of(meeting(a, b, before, Math.min(beforeS + waitS, endS), waitS)) : Optional.empty();
+    }
+
+    private double timeS(int sweep) {
+        return (frames.get(sweep).meanTimeMs() - originMs) / 1000.0;
+    }
+
+    /** Contact between a sweep that shows a gap and one that shows none, by the speed at which the gap closed. */
+    private Meeting touched(Track a, Track b, Approach apart, double apartS, Approach together, double togetherS) {
+        double waitS = 1000 * apart.gapKm() / Math.max(LEAST_CLOSING_MS, apart.closingMs());
+        double timeS = Math.min(apartS + waitS, togetherS);
+        double share = (timeS - apartS) / (togetherS - apartS);
+        Approach nearer = share < 0.7 ? apart : together;
+        return meeting(a, b, nearer == apart ? apart : together.withClosing(apart), timeS, timeS - apartS);
     }
 
     private List<MovingLine> lines(List<TrackPiece> pieces, Track track) {
         List<MovingLine> lines = new ArrayList<>();
         double fallback = track.speed().isKnown() ? track.speed().speedMs() : 5;
         for (TrackPiece piece : pieces) {
-            lines.add(MovingLine.of(piece, originMs, settings.extendKm(), fallback));
+            lines.add(MovingLine.of(piece, originMs, settings.extendKm(), fallback, radius(track, piece.sweep())));
         }
         return lines;
     }
 
-    private Meeting meeting(Track a, Track b, Approach near, double timeS, double lastS) {
+    private static double radius(Track track, int sweep) {
+        return track.arc().stream().flatMap(arc -> arc.radii().stream()).filter(r -> r.sweep() == sweep)
+                .mapToDouble(hemline.boundary.ArcHistory.RadiusAt::radiusKm).findFirst().orElse(Double.NaN);
+    }
+
+    private Meeting meeting(Track a, Track b, Approach near, double timeS, double waitS) {
         double closing = Math.max(near.closingMs(), LEAST_CLOSING_MS);
-        double wait = Math.min(1000 * near.gapKm() / closing, Math.max(0, lastS - timeS));
         // sₜ = sqrt(s_d² + t²(s₁² + s₂²)) / (c₁ + c₂)
-        double sdS = 1000 * Math.hypot(GAP_SD_KM + 0.1 * near.carriedKm(), wait / 1000 * near.sdMs()) / closing;
-        double across = GAP_SD_KM;
+        double sdS = 1000 * Math.hypot(Math.hypot(GAP_SD_KM, near.carrySdKm()), waitS / 1000 * near.sdMs()) / closing;
+        double across = Math.hypot(GAP_SD_KM, near.carrySdKm());
         double along = Math.max(across, across / Math.max(0.1, Math.sin(Math.toRadians(near.crossDeg()))));
         double bearing = new Point(near.alongX(), near.alongY()).bearingDeg() % 180;
-        return new Meeting("-", a.id(), b.id(), originMs + Math.round(1000 * (timeS + wait)), sdS,
+        return new Meeting("-", a.id(), b.id(), originMs + Math.round(1000 * timeS), sdS,
                 new Point(near.x(), near.y()), new Meeting.Ellipse(along, across, bearing), near.crossDeg(),
                 new Speed(closing, near.sdMs()), Meeting.Status.OBSERVED, 1);
     }

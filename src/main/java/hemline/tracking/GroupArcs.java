@@ -24,10 +24,9 @@ final class GroupArcs {
     private static final int LEAST_GUARDED = 80;
     private static final int LEAST_JOINED = 24;
     /** Rise of the cost by which two arcs are better than one, in all and for each independent point. */
-    private static final double FORBID_COST = 25;
-    private static final double FORBID_MEAN = 0.5;
-    private static final double JOIN_COST = 9;
-    private static final double JOIN_MEAN = 0.3;
+    private static final double FORBID_COST = 40;
+    private static final double FORBID_MEAN = 4;
+    private static final double JOIN_MEAN = 1.6;
 
     private final VertexCloud cloud;
     private final MotionLattice.Motion motion;
@@ -180,8 +179,7 @@ final class GroupArcs {
             return;
         }
         Excess excess = excess(first, second);
-        if (excess != null && excess.cost() < JOIN_COST + JOIN_MEAN * 0.2 * Math.min(vertices(first), vertices(second))
-                && excess.mean() < 2 * JOIN_MEAN && outward(first, second)) {
+        if (excess != null && excess.mean() < JOIN_MEAN && outward(first, second)) {
             queue.add(new Pair(excess.mean(), a, b));
         }
     }

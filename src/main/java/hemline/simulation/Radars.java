@@ -17,6 +17,8 @@ import java.util.Optional;
  */
 public final class Radars {
     private static final List<RadarSpec> CATALOGUE = List.of(
+            radar("lornfield", 48.27, 66.84, 176, new Dish(1.0, 0.5, 20, 360, 18, 0.06), gates(250, 112),
+                    new Receiver(-41, 1.5, 18, Packing.BYTE, 26.5), new Timing(300, 5, 0)),
             radar("harrowmere", 47.62, 61.35, 214, new Dish(1.0, 0.5, 25, 360, 18, 0.05), gates(250, 130),
                     new Receiver(-42, 1.5, 16, Packing.SHORT, 26.4), new Timing(300, 4, 0)),
             radar("tolvane", -33.41, 141.87, 88, new Dish(0.9, 0.5, 22, 360, 21, 0.08), gates(500, 140),

@@ -1,14 +1,13 @@
 package hemline.simulation;
 
 import hemline.simulation.catalogue.SceneCatalogue;
+import hemline.simulation.catalogue.SceneKind;
 import hemline.simulation.catalogue.SceneKit;
 import hemline.simulation.radar.RadarSpec;
 import java.util.List;
 
 /** The kinds of scene, by name. */
 public final class Scenes {
-    private static final int USUAL_SWEEPS = 14;
-
     private Scenes() {
     }
 
@@ -22,9 +21,10 @@ public final class Scenes {
      * @throws IllegalArgumentException when there is no such kind
      */
     public static SimulatedLoop build(String name, RadarSpec radar, long seed) {
-        double[] starts = Simulation.sweepStartsS(radar, USUAL_SWEEPS, seed);
+        SceneKind kind = SceneCatalogue.named(name);
+        int sweeps = SceneCatalogue.sweeps(name);
+        double[] starts = Simulation.sweepStartsS(radar, sweeps, seed);
         double spanS = starts[starts.length - 1] - starts[0];
-        return Simulation.of(SceneCatalogue.named(name).build(new SceneKit(name, radar, spanS, seed)), radar,
-                USUAL_SWEEPS, seed);
+        return Simulation.of(kind.build(new SceneKit(name, radar, spanS, seed)), radar, sweeps, seed);
     }
 }

@@ -6,6 +6,8 @@ import java.util.Map;
 
 /** Every kind of scene by its name. */
 public final class SceneCatalogue {
+    private static final String SAMPLE = "sample";
+    private static final int USUAL_SWEEPS = 14;
     private static final Map<String, SceneKind> KINDS = kinds();
 
     private SceneCatalogue() {
@@ -13,6 +15,7 @@ public final class SceneCatalogue {
 
     private static Map<String, SceneKind> kinds() {
         Map<String, SceneKind> kinds = new LinkedHashMap<>();
+        kinds.put(SAMPLE, SampleScene::build);
         kinds.put("straight-line", OutflowScenes::straightLine);
         kinds.put("fast-bow", OutflowScenes::fastBow);
         kinds.put("single-ring", OutflowScenes::singleRing);
@@ -23,6 +26,11 @@ public final class SceneCatalogue {
 
     public static List<String> names() {
         return List.copyOf(KINDS.keySet());
+    }
+
+    /** How many sweeps a loop of a kind has. */
+    public static int sweeps(String name) {
+        return name.equals(SAMPLE) ? SampleScene.SWEEPS : USUAL_SWEEPS;
     }
 
     /** @throws IllegalArgumentException when there is none of that name */

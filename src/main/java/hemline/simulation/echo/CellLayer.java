@@ -9,8 +9,8 @@ import org.apache.commons.math3.util.FastMath;
 
 /** A rain cell: a steep core in dBZ with ragged edges, as deep as any beam within range is high. */
 final class CellLayer implements EchoLayer {
+    /** Loss at the radius, dB; it grows with distance to the power of 3/2. */
     private static final double LOSS_AT_RADIUS_DB = 12;
-    private static final double STEEPNESS = 1.35;
     private static final double FAINTEST_DBZ = -6;
     /** How far below its full strength a cell starts and ends, dB. */
     private static final double YOUNG_DB = 45;
@@ -42,7 +42,7 @@ final class CellLayer implements EchoLayer {
         }
         Point centre = cell.startKm().plus(cell.driftMs().times((ray.timeS - cell.life().fromS()) / 1000));
         double reach = 1.8 * cell.radiusKm() * Math.sqrt(cell.stretch())
-                * FastMath.pow((peak - FAINTEST_DBZ) / LOSS_AT_RADIUS_DB, 1 / STEEPNESS);
+                * FastMath.pow((peak - FAINTEST_DBZ) / LOSS_AT_RADIUS_DB, 2.0 / 3);
         double abeam = Math.abs(centre.xKm() * ray.cos - centre.yKm() * ray.sin);
         double along = centre.xKm() * ray.sin + centre.yKm() * ray.cos;
         if (abeam > reach || along < -reach) {
@@ -50,6 +50,8 @@ final class CellLayer implements EchoLayer {
         }
         double half = Math.sqrt(reach * reach - abeam * abeam);
         double radial = cell.driftMs().xKm() * ray.sin + cell.driftMs().yKm() * ray.cos;
+        Texture.Still outline = ragged.still(ray.timeS);
+        Texture.Still lumps = speckled.still(ray.timeS);
         double squeeze = Math.sqrt(cell.stretch());
         for (int b = 0; b < ray.bins(); b++) {
             double range = ray.grid.groundKm(b);
@@ -62,10 +64,10 @@ final class CellLayer implements EchoLayer {
             double v = (dx * cos - dy * sin) * squeeze;
             double distance = Math.sqrt(u * u + v * v) / cell.radiusKm();
             // Raggedness stays a matter of the outline: far out it must not pull up echo of its own.
-            distance *= Math.max(0.45, 1 + ragged.at(dx, dy, ray.timeS) / Math.max(1, distance));
-            double dbz = peak - LOSS_AT_RADIUS_DB * FastMath.pow(distance, STEEPNESS);
+            distance *= Math.max(0.45, 1 + outline.at(dx, dy) / Math.max(1, distance));
+            double dbz = peak - LOSS_AT_RADIUS_DB * distance * Math.sqrt(distance);
             if (dbz > FAINTEST_DBZ) {
-                ray.addRest(b, Decibels.toLinear(dbz + speckled.at(dx, dy, ray.timeS)), radial);
+                ray.addRest(b, Decibels.toLinear(dbz + lumps.at(dx, dy)), radial);
             }
         }
     }

@@ -86,6 +86,8 @@ public final class FrontField {
     public final class Now {
         private final double timeS;
         private final FrontCurve.Still[] still;
+        private final Texture.Still[] strengths;
+        private final Texture.Still[] gaps;
         private final double[] growthFade;
         private final double[] aheadKm;
         private final double[] station;
@@ -96,6 +98,8 @@ public final class FrontField {
             this.timeS = timeS;
             int n = fronts.size();
             still = new FrontCurve.Still[n];
+            strengths = new Texture.Still[n];
+            gaps = new Texture.Still[n];
             growthFade = new double[n];
             aheadKm = new double[n];
             station = new double[n];
@@ -103,6 +107,8 @@ public final class FrontField {
             for (int i = 0; i < n; i++) {
                 if (fronts.get(i).life().share(timeS) > 0) {
                     still[i] = fronts.get(i).curve().still(timeS);
+                    strengths[i] = strength[i].still(timeS);
+                    gaps[i] = breaks[i].still(timeS);
                 }
                 growthFade[i] = fronts.get(i).look().trendDbPerH() * timeS / 3600;
             }
@@ -181,9 +187,9 @@ public final class FrontField {
                 u = RING_LAYOUT_KM * FastMath.sin(u);
             }
             across *= FastMath.exp(-WIDTH_VARIATION * widths.at(u / WIDTH_SCALE_KM + 31 * front, v / WIDTH_SCALE_KM));
-            double gap = breaks[front].at(u, v, timeS) - breakLevel[front];
+            double gap = gaps[front].at(u, v) - breakLevel[front];
             double unbroken = look.brokenShare() > 0 ? Steps.smooth(0.5 + gap / 0.5) : 1;
-            double dbz = look.peakDbz() + growthFade[front] + strength[front].at(u, v, timeS);
+            double dbz = look.peakDbz() + growthFade[front] + strengths[front].at(u, v);
             return share[front] * survival(front) * unbroken * Decibels.toLinear(dbz)
                     * FastMath.exp(-0.5 * across * across);
         }

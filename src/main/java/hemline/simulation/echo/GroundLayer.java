@@ -33,6 +33,8 @@ final class GroundLayer implements EchoLayer {
         if (Math.abs(cx * ray.cos - cy * ray.sin) > ground.radiusKm()) {
             return;
         }
+        Texture.Still still = lumps.still(0);
+        LatticeNoise.Still flickering = flicker.still(ray.timeS / FLICKER_S);
         for (int b = 0; b < ray.bins(); b++) {
             double dx = ray.xKm[b] - cx;
             double dy = ray.yKm[b] - cy;
@@ -40,10 +42,10 @@ final class GroundLayer implements EchoLayer {
             if (off >= 1) {
                 continue;
             }
-            double above = lumps.at(ray.xKm[b], ray.yKm[b], 0) - level - 1.2 * off;
+            double above = still.at(ray.xKm[b], ray.yKm[b]) - level - 2 * off;
             if (above > -0.3) {
                 double dbz = ground.peakDbz() - 32 * (1 - Steps.smooth(0.35 + 0.5 * above));
-                dbz += ground.flickerDb() * flicker.at(ray.xKm[b] / 0.7, ray.yKm[b] / 0.7, ray.timeS / FLICKER_S);
+                dbz += ground.flickerDb() * flickering.at(ray.xKm[b] / 0.7, ray.yKm[b] / 0.7);
                 ray.addRest(b, Decibels.toLinear(dbz), 0);
             }
         }

@@ -109,11 +109,11 @@ public final class RingCurve implements FrontCurve {
                     foot.station = 0;
                     return;
                 }
-                double phi = FastMath.atan2(dx, dy);
+                double phi = Bearing.of(dx, dy);
                 double place = turned(phi);
                 double g = read(shape, place);
                 double bend = read(slope, place);
-                foot.station = phi < 0 ? phi + TURN : phi;
+                foot.station = phi;
                 foot.aheadKm = (distance - radius * g) * g / Math.sqrt(g * g + bend * bend);
             }
 

@@ -15,7 +15,8 @@ import org.apache.commons.math3.util.FastMath;
  *
  * <pre>p = smooth((c − 0.5)/1.5) / (1 + exp(−1.5 (c/s − 3)))</pre>
  *
- * and 0 on a lost ray or where the beam centre is 1.5 km or more above the radar. The constants are our own choice, set by
+ * and 0 on a lost ray or where the beam centre is 1.5 km or more above the radar; {@link AlongLine} then averages along
+ * the line. The constants are our own choice, set by
  * looking at pictures of sweeps; they have no other source.
  */
 final class Detectability {

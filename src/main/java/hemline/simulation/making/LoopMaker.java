@@ -39,7 +39,7 @@ public final class LoopMaker {
         Streams streams = new Streams(seed).part(scene.name(), 0).part(radar.site().name(), 0);
         sweeps = new SweepMaker(scene, radar, streams);
         reception = new Reception(radar, streams);
-        truth = new TruthMaker(sweeps.fronts(), scene.startMs());
+        truth = new TruthMaker(sweeps.fronts(), radar, scene.startMs());
     }
 
     public int size() {

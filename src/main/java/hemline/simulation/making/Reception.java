@@ -18,7 +18,6 @@ import org.apache.commons.math3.util.FastMath;
 final class Reception {
     /** Spectrum width of clear air and rain, m s⁻¹: sets the error of a velocity. */
     private static final double SPECTRUM_WIDTH_MS = 1.5;
-    private static final double VELOCITY_STEP_MS = 0.01;
     private final RadarSpec radar;
     private final Speckle speckle;
     private final Streams streams;
@@ -71,6 +70,7 @@ final class Reception {
         double nyquist = radar.receiver().nyquistMs();
         double value = clean.velocity[gate] + worse * error;
         double turn = FastMath.floor((value + nyquist) / (2 * nyquist));
-        return (float) (FastMath.rint((value - 2 * nyquist * turn) / VELOCITY_STEP_MS) * VELOCITY_STEP_MS);
+        Packing packing = radar.receiver().velocityPacking();
+        return (float) packing.unpack(packing.pack(value - 2 * nyquist * turn));
     }
 }

@@ -6,6 +6,7 @@ import hemline.geometry.Point;
 import hemline.simulation.echo.FrontField;
 import hemline.simulation.front.CurvePoint;
 import hemline.simulation.front.FrontCurve;
+import hemline.simulation.radar.RadarSpec;
 import hemline.simulation.scene.Front;
 import java.util.ArrayList;
 import java.util.List;
@@ -19,8 +20,10 @@ final class TruthMaker {
     private static final int TIME_STEPS = 4;
     private final FrontField fronts;
     private final long sceneStartMs;
+    private final AlongLine alongLine;
 
-    TruthMaker(FrontField fronts, long sceneStartMs) {
+    TruthMaker(FrontField fronts, RadarSpec radar, long sceneStartMs) {
+        alongLine = new AlongLine(radar);
         this.fronts = fronts;
         this.sceneStartMs = sceneStartMs;
     }
@@ -35,42 +38,27 @@ final class TruthMaker {
         double span = curve.lastStation() - curve.firstStation();
         int steps = Math.max(8, (int) Math.ceil(span * curve.kmPerStation(middleS) * 1.1 / SPACING_KM));
         Contrast contrast = new Contrast(clean);
-        List<TruthLine> found = new ArrayList<>();
-        List<TruthVertex> run = new ArrayList<>();
-        List<TruthVertex> firstRun = null;
+        List<List<TruthVertex>> runs = new ArrayList<>();
+        boolean open = false;
+        boolean fromStart = false;
         for (int i = 0; i <= steps; i++) {
             TruthVertex vertex = vertex(front, curve.firstStation() + span * i / steps, clean, contrast);
-            if (vertex != null) {
-                run.add(vertex);
+            if (vertex != null && !open) {
+                runs.add(new ArrayList<>());
+                fromStart |= i == 0;
             }
-            if (vertex == null || i == steps) {
-                if (firstRun == null && i > 0 && run.size() == i) {
-                    firstRun = run;
-                }
-                close(run, sweep, found, curve.closed() && i == steps && firstRun != run ? firstRun : null);
-                run = new ArrayList<>();
+            open = vertex != null;
+            if (open) {
+                runs.get(runs.size() - 1).add(vertex);
             }
         }
-        return found;
-    }
-
-    /** Ends a stretch; on a ring, the last stretch runs on into the first. */
-    private static void close(List<TruthVertex> run, int sweep, List<TruthLine> found, List<TruthVertex> runsInto) {
-        if (run.isEmpty()) {
-            return;
+        if (curve.closed() && open && fromStart && runs.size() > 1) {
+            // On a ring the last stretch runs on into the first; they share one vertex.
+            List<TruthVertex> first = runs.remove(0);
+            runs.get(runs.size() - 1).addAll(first.subList(1, first.size()));
         }
-        List<TruthVertex> whole = new ArrayList<>(run);
-        if (runsInto != null) {
-            found.removeIf(line -> line.vertices().equals(runsInto));
-            whole.addAll(runsInto.subList(1, runsInto.size()));
-        }
-        double length = 0;
-        for (int i = 1; i < whole.size(); i++) {
-            length += Math.hypot(whole.get(i).xKm() - whole.get(i - 1).xKm(), whole.get(i).yKm() - whole.get(i - 1).yKm());
-        }
-        if (length >= LEAST_LENGTH_KM) {
-            found.add(new TruthLine(sweep, whole));
-        }
+        return runs.stream().filter(run -> AlongLine.lengthKm(run, 0, run.size() - 1) >= LEAST_LENGTH_KM)
+                .map(run -> new TruthLine(sweep, alongLine.smoothed(run))).toList();
     }
 
     /** The vertex of a station at the time its own ray passed over it, or null where the front is not there. */
@@ -87,12 +75,10 @@ final class TruthMaker {
                 || !contrast.read(point.place(), point.normal())) {
             return null;
         }
-        boolean forward = point.normalMs() >= 0;
-        Point toward = forward ? point.normal() : point.normal().times(-1);
+        Point toward = point.normalMs() >= 0 ? point.normal() : point.normal().times(-1);
         return new TruthVertex(rounded(point.place().xKm(), 4), rounded(point.place().yKm(), 4),
-                sceneStartMs + Math.round(1000 * timeS), rounded(seen(clean, point, contrast), 3),
-                rounded(contrast.crestDbz, 2), rounded(toward.bearingDeg(), 2) % 360,
-                rounded(Math.abs(point.normalMs()), 3));
+                sceneStartMs + Math.round(1000 * timeS), seen(clean, point, contrast), rounded(contrast.crestDbz, 2),
+                rounded(toward.bearingDeg(), 2) % 360, rounded(Math.abs(point.normalMs()), 3));
     }
 
     private static double rayTimeS(CleanSweep clean, Point place) {

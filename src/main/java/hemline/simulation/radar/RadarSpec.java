@@ -24,6 +24,12 @@ public record RadarSpec(RadarSite site, Dish dish, Gates gates, Receiver receive
      */
     public record Dish(double beamWidthDeg, double elevationDeg, double aboveGroundM, int rays, double turnDegS,
                        double jitterDeg) {
+        public Dish {
+            // Files hold these in single precision.
+            beamWidthDeg = (float) beamWidthDeg;
+            elevationDeg = (float) elevationDeg;
+        }
+
         /** Nominal angle between rays, degrees. */
         public double stepDeg() {
             return 360.0 / rays;
@@ -47,6 +53,13 @@ public record RadarSpec(RadarSite site, Dish dish, Gates gates, Receiver receive
      * @param nyquistMs       unambiguous velocity, m s⁻¹
      */
     public record Receiver(double noiseAtOneKmDbz, double thresholdDb, int samples, Packing packing, double nyquistMs) {
+        public Receiver {
+            nyquistMs = (float) nyquistMs;
+        }
+
+        public Packing velocityPacking() {
+            return packing.forVelocity(nyquistMs);
+        }
     }
 
     /**

@@ -25,16 +25,30 @@ public final class LatticeNoise {
     }
 
     /** As {@link #at(double, double)}, changing wholly while {@code age} grows by 1; the variance stays 1. */
-    public double at(double x, double y, double age) {
-        double whole = FastMath.floor(age);
-        double turn = 0.5 * Math.PI * (age - whole);
-        long layer = (long) whole;
-        return FastMath.cos(turn) * layer(x, y, layer) + FastMath.sin(turn) * layer(x, y, layer + 1);
+    public Still still(double age) {
+        return new Still(age);
     }
 
-    private double layer(double x, double y, long layer) {
-        long shift = Streams.mix(layer);
-        return plane(x, y, (int) (shift & MASK), (int) ((shift >>> 8) & MASK));
+    /** The noise at one age: two patterns, the older giving way to the younger. */
+    public final class Still {
+        private final double older;
+        private final double younger;
+        private final int olderShift;
+        private final int youngerShift;
+
+        private Still(double age) {
+            double whole = FastMath.floor(age);
+            double turn = 0.5 * Math.PI * (age - whole);
+            older = FastMath.cos(turn);
+            younger = FastMath.sin(turn);
+            olderShift = (int) Streams.mix((long) whole);
+            youngerShift = (int) Streams.mix((long) whole + 1);
+        }
+
+        public double at(double x, double y) {
+            return older * plane(x, y, olderShift & MASK, (olderShift >>> 8) & MASK)
+                    + younger * plane(x, y, youngerShift & MASK, (youngerShift >>> 8) & MASK);
+        }
     }
 
     private double plane(double x, double y, int shiftX, int shiftY) {

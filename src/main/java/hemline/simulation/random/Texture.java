@@ -14,6 +14,8 @@ public final class Texture {
     private final double[] cos;
     private final double[] sin;
     private final double[] shift;
+    private final double[] perKm;
+    private final double[] sd;
 
     /**
      * @param scaleKm   distance between lattice points, km: lumps are about as large
@@ -36,27 +38,46 @@ public final class Texture {
         cos = new double[n];
         sin = new double[n];
         shift = new double[n];
+        perKm = new double[n];
+        sd = new double[n];
         for (int i = 0; i < n; i++) {
             RandomGenerator random = streams.stream("octave", i, 0);
             double turn = 2 * Math.PI * random.nextDouble();
             cos[i] = FastMath.cos(turn);
             sin[i] = FastMath.sin(turn);
             shift[i] = 100 * random.nextDouble();
+            perKm[i] = 1 / octaves.get(i).scaleKm();
+            sd[i] = octaves.get(i).sd();
             noises[i] = new LatticeNoise(random);
         }
     }
 
-    /** The value at a place that already moves with the field (km) and a time (s). */
-    public double at(double xKm, double yKm, double timeS) {
-        double sum = 0;
-        for (int i = 0; i < noises.length; i++) {
-            Octave octave = octaves.get(i);
-            double u = (cos[i] * xKm + sin[i] * yKm) / octave.scaleKm() + shift[i];
-            double v = (cos[i] * yKm - sin[i] * xKm) / octave.scaleKm() + shift[i];
-            double noise = Double.isInfinite(octave.lifetimeS()) ? noises[i].at(u, v)
-                    : noises[i].at(u, v, timeS / octave.lifetimeS() + shift[i]);
-            sum += octave.sd() * noise;
+    /** The field at a time, s, for many questions about places. */
+    public Still still(double timeS) {
+        return new Still(timeS);
+    }
+
+    /** The field at one time. */
+    public final class Still {
+        private final LatticeNoise.Still[] changing = new LatticeNoise.Still[noises.length];
+
+        private Still(double timeS) {
+            for (int i = 0; i < changing.length; i++) {
+                if (!Double.isInfinite(octaves.get(i).lifetimeS())) {
+                    changing[i] = noises[i].still(timeS / octaves.get(i).lifetimeS() + shift[i]);
+                }
+            }
         }
-        return sum;
+
+        /** The value at a place that already moves with the field, km. */
+        public double at(double xKm, double yKm) {
+            double sum = 0;
+            for (int i = 0; i < changing.length; i++) {
+                double u = (cos[i] * xKm + sin[i] * yKm) * perKm[i] + shift[i];
+                double v = (cos[i] * yKm - sin[i] * xKm) * perKm[i] + shift[i];
+                sum += sd[i] * (changing[i] == null ? noises[i].at(u, v) : changing[i].at(u, v));
+            }
+            return sum;
+        }
     }
 }

@@ -29,7 +29,7 @@ record FileSurvey(Path path, String sha256, Optional<String> refusal, boolean sk
             if (candidate.found() && Content.of(new InputFile(path)).kind().isBystander()) {
                 return refused(path, sha256, "no radar file", true);
             }
-            try (RadarFile file = RadarFiles.open(path)) {
+            try (RadarFile file = RadarFiles.openLow(path, options)) {
                 return taken(file, sha256, options, cache);
             }
         } catch (UnreadableFileException e) {
@@ -62,7 +62,7 @@ record FileSurvey(Path path, String sha256, Optional<String> refusal, boolean sk
                 requireMeasured(file, head, sweep);
                 int rank = FieldChooser.reflectivityRank(
                         FieldChooser.reflectivity(head.fields(), options.fieldChoice()).orElseThrow());
-                SweepTicket ticket = new SweepTicket(file.path(), cut, Optional.empty(), site, head.elevationDeg(),
+                SweepTicket ticket = new SweepTicket(file.path(), cut, file.span(cut), Optional.empty(), site, head.elevationDeg(),
                         sweep.startMs(), sweep.endMs(), rank);
                 tickets.add(ticket);
                 cache.put(ticket, sweep);

@@ -2,6 +2,7 @@ package hemline.reader;
 
 import hemline.sweep.RadarSite;
 import java.util.List;
+import java.util.Optional;
 
 /** An opened file of one format: what it holds, and the values of one field of one sweep at a time. */
 interface FormatFile extends AutoCloseable {
@@ -17,6 +18,16 @@ interface FormatFile extends AutoCloseable {
     }
 
     List<SweepHead> sweeps();
+
+    /** Index in its volume of the first of {@link #sweeps()}; above 0 only where a part of a volume was opened. */
+    default int firstIndex() {
+        return 0;
+    }
+
+    /** Where some neighbouring sweeps lie, for formats in which finding them takes a walk through the file. */
+    default Optional<SweepSpan> span(int first, int last) {
+        return Optional.empty();
+    }
 
     /** What had to be assumed about the file as a whole. */
     List<String> notes();

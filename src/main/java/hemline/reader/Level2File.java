@@ -17,6 +17,7 @@ import java.util.Optional;
  */
 final class Level2File implements FormatFile {
     private final InputFile file;
+    private final int firstIndex;
     private final Level2Messages messages;
     private final String format;
     private final RadarSite site;
@@ -29,6 +30,7 @@ final class Level2File implements FormatFile {
     private Level2File(InputFile file, Level2Messages messages, Survey survey, String version) {
         this.file = file;
         this.messages = messages;
+        firstIndex = survey.firstIndex;
         sweeps = survey.sweeps;
         heads = new ArrayList<>();
         for (int i = 0; i < sweeps.size(); i++) {
@@ -41,12 +43,25 @@ final class Level2File implements FormatFile {
         antennaAboveSiteM = survey.antennaAboveGroundM;
     }
 
+    /** Opens all cuts. */
     static Level2File open(InputFile file, Content content) throws UnreadableFileException {
-        return open(file, content, Level2Position.START, Level2Position.END, 0);
+        return open(file, content, new SweepSpan(Level2Position.START, Level2Position.END, 0), Optional.empty());
     }
 
-    /** Opens only the cuts between two positions, the first of which has the given index in the volume. */
-    static Level2File open(InputFile file, Content content, Level2Position from, Level2Position to, int firstIndex)
+    /** Opens the cuts up to the last planned one at the lowest elevation that the options take. */
+    static Level2File openLow(InputFile file, Content content, ReadOptions options) throws UnreadableFileException {
+        Level2File low = open(file, content, new SweepSpan(Level2Position.START, Level2Position.END, 0),
+                Optional.of(options));
+        boolean asPlanned = low.heads.stream().anyMatch(head -> options.takes(head.elevationDeg()));
+        return asPlanned ? low : open(file, content);
+    }
+
+    /** Opens some cuts again. */
+    static Level2File openSpan(InputFile file, Content content, SweepSpan span) throws UnreadableFileException {
+        return open(file, content, span, Optional.empty());
+    }
+
+    private static Level2File open(InputFile file, Content content, SweepSpan span, Optional<ReadOptions> lowOnly)
             throws UnreadableFileException {
         byte[] head = file.shield("volume header", () -> {
             try (var in = content.stream()) {
@@ -60,8 +75,8 @@ final class Level2File implements FormatFile {
         Level2Messages messages = packed ? new Level2Packed(content.bytes()) : new Level2Plain(file, content);
         String version = Level2Radial.text(ByteBuffer.wrap(head), 0, 8);
         String name = Level2Radial.text(ByteBuffer.wrap(head), 20, 4).replaceAll("[^A-Z0-9]", "");
-        Survey survey = new Survey(name.isEmpty() ? "unknown" : name, firstIndex);
-        messages.visit(from, to, survey);
+        Survey survey = new Survey(name.isEmpty() ? "unknown" : name, span.firstIndex(), lowOnly);
+        messages.visit(span.from(), span.to(), survey);
         if (survey.sweeps.isEmpty()) {
             throw file.broken("", "holds no radial: the volume is cut off after its metadata, or damaged"
                     + (messages.notes().isEmpty() ? "" : " (" + messages.notes().get(0) + ")"));
@@ -73,6 +88,8 @@ final class Level2File implements FormatFile {
     private static final class Survey implements Level2Messages.Visitor {
         private final List<Level2Sweep> sweeps = new ArrayList<>();
         private final int firstIndex;
+        private final Optional<ReadOptions> lowOnly;
+        private int lastCut;
         private String name;
         private int messageType;
         private int pattern;
@@ -80,9 +97,15 @@ final class Level2File implements FormatFile {
         private double groundM = Double.NaN;
         private double antennaAboveGroundM;
 
-        Survey(String name, int firstIndex) {
+        Survey(String name, int firstIndex, Optional<ReadOptions> lowOnly) {
             this.name = name;
             this.firstIndex = firstIndex;
+            this.lowOnly = lowOnly;
+        }
+
+        @Override
+        public void pattern(ByteBuffer body) {
+            lowOnly.ifPresent(options -> lastCut = Math.max(lastCut, Level2Pattern.lastLowCut(body, options)));
         }
 
         @Override
@@ -95,11 +118,11 @@ final class Level2File implements FormatFile {
             describe(type, body, radial);
             Level2Sweep last = sweeps.isEmpty() ? null : sweeps.get(sweeps.size() - 1);
             if (last == null || !last.continuesWith(radial)) {
-                if (sweeps.size() == Limits.MAX_SWEEPS) {
-                    return false;
-                }
                 if (last != null) {
                     last.endAt(at);
+                }
+                if (sweeps.size() == Limits.MAX_SWEEPS || lastCut > 0 && radial.elevationNumber() > lastCut) {
+                    return false;
                 }
                 last = new Level2Sweep(radial.elevationNumber(), at);
                 sweeps.add(last);
@@ -143,6 +166,16 @@ final class Level2File implements FormatFile {
     @Override
     public double antennaAboveSiteM() {
         return antennaAboveSiteM;
+    }
+
+    @Override
+    public int firstIndex() {
+        return firstIndex;
+    }
+
+    @Override
+    public Optional<SweepSpan> span(int first, int last) {
+        return Optional.of(new SweepSpan(sweeps.get(first).from(), sweeps.get(last).to(), firstIndex + first));
     }
 
     @Override

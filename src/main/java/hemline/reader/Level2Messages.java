@@ -17,9 +17,13 @@ interface Level2Messages {
     int DIGITAL_RADAR_DATA = 1;
     int DIGITAL_RADAR_DATA_GENERIC = 31;
 
-    /** Told of each message that holds a radial. */
+    /** Told of the messages that matter here. */
     @FunctionalInterface
     interface Visitor {
+        /** A volume coverage pattern, message 5 or 7, before the radials. */
+        default void pattern(ByteBuffer body) {
+        }
+
         /**
          * @param type 1 or 31
          * @param body the message after its header, big endian
@@ -50,6 +54,14 @@ interface Level2Messages {
             bytes = head.getInt(at + CHANNEL_BYTES + 12) & 0xffffffffL;
         }
         return bytes < HEADER_BYTES + 32 || bytes > 1 << 20 ? 0 : (int) bytes + CHANNEL_BYTES;
+    }
+
+    static boolean isRadial(int type) {
+        return type == DIGITAL_RADAR_DATA || type == DIGITAL_RADAR_DATA_GENERIC;
+    }
+
+    static boolean isPattern(int type) {
+        return type == 5 || type == 7;
     }
 
     static int type(ByteBuffer head, int at) {

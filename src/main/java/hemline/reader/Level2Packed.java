@@ -88,13 +88,14 @@ final class Level2Packed implements Level2Messages {
                 continue;
             }
             int type = Level2Messages.type(in, at);
-            if (type == DIGITAL_RADAR_DATA || type == DIGITAL_RADAR_DATA_GENERIC) {
-                int body = at + CHANNEL_BYTES + HEADER_BYTES;
-                int end = Math.min(bytes.length, at + frame);
-                boolean whole = type == DIGITAL_RADAR_DATA || end == at + frame;
-                if (whole && !visitor.radial(type, in.slice(body, end - body), new Level2Position(record, at))) {
-                    return false;
-                }
+            int body = at + CHANNEL_BYTES + HEADER_BYTES;
+            int end = Math.min(bytes.length, at + frame);
+            boolean whole = type != DIGITAL_RADAR_DATA_GENERIC || end == at + frame;
+            if (Level2Messages.isPattern(type)) {
+                visitor.pattern(in.slice(body, end - body));
+            } else if (Level2Messages.isRadial(type) && whole
+                    && !visitor.radial(type, in.slice(body, end - body), new Level2Position(record, at))) {
+                return false;
             }
             at += frame;
         }

@@ -68,10 +68,12 @@ final class Level2Plain implements Level2Messages {
             body = body.length < rest ? new byte[rest] : body;
             int read = in.readNBytes(body, 0, rest);
             int type = Level2Messages.type(words, 0);
-            boolean radial = frame > 0 && (type == DIGITAL_RADAR_DATA || type == DIGITAL_RADAR_DATA_GENERIC);
-            if (radial && (read == rest || type == DIGITAL_RADAR_DATA)) {
+            ByteBuffer whole = ByteBuffer.wrap(body, 0, read).slice();
+            if (frame > 0 && Level2Messages.isPattern(type)) {
+                visitor.pattern(whole);
+            } else if (frame > 0 && Level2Messages.isRadial(type) && (read == rest || type == DIGITAL_RADAR_DATA)) {
                 radialAt = at;
-                if (!visitor.radial(type, ByteBuffer.wrap(body, 0, read).slice(), new Level2Position(0, at))) {
+                if (!visitor.radial(type, whole, new Level2Position(0, at))) {
                     return;
                 }
             }

@@ -28,7 +28,7 @@ public final class RadarFile implements AutoCloseable {
     public RadarFileFacts facts() {
         List<SweepFacts> sweeps = new ArrayList<>();
         for (SweepHead head : format.sweeps()) {
-            sweeps.add(facts(sweeps.size(), head));
+            sweeps.add(facts(format.firstIndex() + sweeps.size(), head));
         }
         return new RadarFileFacts(file.path(), format.format(), format.site(), format.antennaAboveSiteM(),
                 sweeps, format.notes());
@@ -99,19 +99,21 @@ public final class RadarFile implements AutoCloseable {
         SweepHead head = head(sweep);
         FieldHead found = head.fields().stream().filter(f -> f.name().equals(field)).findFirst()
                 .orElseThrow(() -> noField(head, FieldChoice.named(field)));
-        return FieldSummary.of(format.values(sweep, found), found.ranges().gates());
+        return FieldSummary.of(format.values(sweep - format.firstIndex(), found), found.ranges().gates());
     }
 
     SweepAssembly.Stored stored(int sweep, FieldHead field) throws UnreadableFileException {
-        return new SweepAssembly.Stored(field, head(sweep).rays(), format.values(sweep, field));
+        return new SweepAssembly.Stored(field, head(sweep).rays(), format.values(sweep - format.firstIndex(), field));
     }
 
     SweepHead head(int sweep) {
         List<SweepHead> sweeps = format.sweeps();
-        if (sweep < 0 || sweep >= sweeps.size()) {
-            throw new IllegalArgumentException("sweep must be within 0.." + (sweeps.size() - 1) + ", got " + sweep);
+        int first = format.firstIndex();
+        if (sweep < first || sweep >= first + sweeps.size()) {
+            throw new IllegalArgumentException("sweep must be within " + first + ".." + (first + sweeps.size() - 1)
+                    + ", got " + sweep);
         }
-        return sweeps.get(sweep);
+        return sweeps.get(sweep - first);
     }
 
     /** The radar with its antenna's altitude. */
@@ -122,6 +124,13 @@ public final class RadarFile implements AutoCloseable {
 
     List<String> notes() {
         return format.notes();
+    }
+
+    /** Where a cut lies, to open it again quickly. */
+    Optional<SweepSpan> span(LowSweeps.Cut cut) {
+        int other = cut.velocity() < 0 ? cut.reflectivity() : cut.velocity();
+        return format.span(Math.min(cut.reflectivity(), other) - format.firstIndex(),
+                Math.max(cut.reflectivity(), other) - format.firstIndex());
     }
 
     List<SweepHead> heads() {

@@ -1,6 +1,7 @@
 package hemline.reader;
 
 import java.nio.file.Path;
+import java.util.Optional;
 
 /** Opens a radar file of any supported format, told by its content and never by its name. */
 public final class RadarFiles {
@@ -18,6 +19,22 @@ public final class RadarFiles {
         InputFile file = new InputFile(path);
         Content content = Content.of(file);
         return new RadarFile(file, format(file, content));
+    }
+
+    /** Opens what is needed of a file to take its low sweeps; of Level II volumes, no cut after the last low one. */
+    static RadarFile openLow(Path path, ReadOptions options) throws UnreadableFileException {
+        InputFile file = new InputFile(path);
+        Content content = Content.of(file);
+        return new RadarFile(file, content.kind() == ContentKind.LEVEL_II
+                ? Level2File.openLow(file, content, options) : format(file, content));
+    }
+
+    /** Opens a file again for some of its sweeps. */
+    static RadarFile reopen(Path path, Optional<SweepSpan> span) throws UnreadableFileException {
+        InputFile file = new InputFile(path);
+        Content content = Content.of(file);
+        return new RadarFile(file, content.kind() == ContentKind.LEVEL_II && span.isPresent()
+                ? Level2File.openSpan(file, content, span.get()) : format(file, content));
     }
 
     private static FormatFile format(InputFile file, Content content) throws UnreadableFileException {

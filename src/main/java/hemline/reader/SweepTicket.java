@@ -10,11 +10,12 @@ import java.util.Optional;
  *
  * @param file     its file
  * @param cut      its place in the file
+ * @param span     where its file keeps it, for formats in which finding it takes long
  * @param donor    a sweep of another file that gives the velocity
  * @param site     the radar as this file names it
  * @param fieldRank how good its reflectivity field is, 0 the best
  */
-record SweepTicket(Path file, LowSweeps.Cut cut, Optional<Donor> donor, RadarSite site, double elevationDeg,
+record SweepTicket(Path file, LowSweeps.Cut cut, Optional<SweepSpan> span, Optional<Donor> donor, RadarSite site, double elevationDeg,
                    long startMs, long endMs, int fieldRank) {
 
     /** A sweep that has velocity and no reflectivity. */
@@ -22,7 +23,7 @@ record SweepTicket(Path file, LowSweeps.Cut cut, Optional<Donor> donor, RadarSit
     }
 
     SweepTicket withDonor(Donor from) {
-        return new SweepTicket(file, cut, Optional.of(from), site, elevationDeg, startMs, endMs, fieldRank);
+        return new SweepTicket(file, cut, span, Optional.of(from), site, elevationDeg, startMs, endMs, fieldRank);
     }
 
     boolean hasVelocity() {
@@ -30,7 +31,7 @@ record SweepTicket(Path file, LowSweeps.Cut cut, Optional<Donor> donor, RadarSit
     }
 
     Sweep load(FieldChoice choice) throws UnreadableFileException {
-        try (RadarFile opened = RadarFiles.open(file)) {
+        try (RadarFile opened = RadarFiles.reopen(file, span)) {
             if (donor.isEmpty()) {
                 return opened.read(cut, choice);
             }

@@ -5,7 +5,9 @@ import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.IntStream;
 import org.apache.commons.compress.compressors.bzip2.BZip2CompressorInputStream;
 
@@ -14,11 +16,15 @@ final class Level2Packed implements Level2Messages {
     /** Unpacked, a record of 120 radials has about 1 MB; bytes. */
     private static final int MOST_RECORD_BYTES = 32 << 20;
     private static final int BATCH = 8;
+    /** Unpacked records kept, so that looking at a cut and reading it unpack it once; bytes. */
+    private static final long KEPT_BYTES = 48 << 20;
 
     private final byte[] file;
     private final int[] start;
     private final int[] length;
     private final List<String> notes = new ArrayList<>();
+    private final Map<Integer, Unpacked> kept = new HashMap<>();
+    private long keptBytes;
 
     Level2Packed(byte[] file) {
         this.file = file;
@@ -58,7 +64,7 @@ final class Level2Packed implements Level2Messages {
         int past = to.offset() > 0 ? (int) Math.min(start.length, to.record() + 1L) : Math.min(start.length, to.record());
         for (int batch = from.record(); batch < past; batch += BATCH) {
             int end = Math.min(past, batch + BATCH);
-            List<Unpacked> unpacked = IntStream.range(batch, end).parallel().mapToObj(this::unpack).toList();
+            List<Unpacked> unpacked = unpacked(batch, end);
             for (int i = 0; i < unpacked.size(); i++) {
                 int record = batch + i;
                 if (!unpacked.get(i).complete && !notes.contains(damage(record))) {
@@ -71,6 +77,18 @@ final class Level2Packed implements Level2Messages {
                 }
             }
         }
+    }
+
+    private List<Unpacked> unpacked(int from, int past) {
+        List<Unpacked> batch = IntStream.range(from, past).parallel()
+                .mapToObj(record -> kept.containsKey(record) ? kept.get(record) : unpack(record)).toList();
+        for (int i = 0; i < batch.size(); i++) {
+            int size = batch.get(i).bytes.length;
+            if (keptBytes + size <= KEPT_BYTES && kept.putIfAbsent(from + i, batch.get(i)) == null) {
+                keptBytes += size;
+            }
+        }
+        return batch;
     }
 
     private static String damage(int record) {

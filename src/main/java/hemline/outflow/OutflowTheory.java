@@ -53,6 +53,10 @@ public final class OutflowTheory {
             add("froude_number", "Froude number, observed speed over sqrt(g'h)",
                     DensityCurrent.froudeNumber(relative, gravity, depth), "", "speed, deficit, depth");
         }
+        if (relative.isKnown() && input.riseHpa().isKnown() && !input.depthM().isKnown()) {
+            add("froude_number", "Froude number, observed speed over sqrt(pressure rise / density)",
+                    relative.over(input.riseHpa().times(100).over(density).power(0.5)), "", "speed, pressure rise");
+        }
         pressures(gravity, depth, relative.isKnown() ? relative : theory);
         return compared(theory);
     }

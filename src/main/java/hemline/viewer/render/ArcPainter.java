@@ -27,9 +27,8 @@ final class ArcPainter {
         Point centre = arc.centreAt(here.timeMs());
         double x = view.screenX(centre);
         double y = view.screenY(centre);
-        double r = here.radiusKm() * view.pxPerKm();
         Lines.pen(g, Inks.faded(colour, 0.8), 1.2, Inks.ARC_FIT);
-        g.strokeOval(x - r, y - r, 2 * r, 2 * r);
+        Lines.circle(g, view, centre, here.radiusKm());
         Point start = arc.centreAt(arc.radii().get(0).timeMs());
         Lines.pen(g, colour, 1.4);
         g.strokeLine(view.screenX(start), view.screenY(start), x, y);

@@ -8,34 +8,33 @@ import hemline.viewer.viewmodel.Overlay;
 import hemline.viewer.viewmodel.StatusModel;
 import hemline.viewer.viewmodel.ViewTransform;
 import hemline.viewer.viewmodel.Words;
-import javafx.geometry.VPos;
 import javafx.scene.canvas.GraphicsContext;
-import javafx.scene.text.TextAlignment;
 
 /** Range rings, azimuth ticks, the height ceiling and the graticule; their spacing follows the zoom. */
 final class GridPainter {
     private static final double LEAST_RING_PX = 95;
     private static final double LEAST_GRATICULE_PX = 110;
     private static final int CURVE_POINTS = 24;
+    private static final Point CENTRE = new Point(0, 0);
 
     void paint(GraphicsContext g, PlaneScene scene) {
         ViewTransform view = scene.view();
         g.setLineWidth(1);
         g.setLineDashes(Inks.SOLID);
-        g.setFont(Inks.SMALL);
+        Letters letters = scene.letters();
         if (scene.shows(Overlay.GRATICULE)) {
-            scene.session().site().position().ifPresent(radar -> graticule(g, view, radar));
+            scene.session().site().position().ifPresent(radar -> graticule(g, view, radar, letters));
         }
         double farKm = farthestKm(view);
         double step = NiceSteps.step(LEAST_RING_PX / view.pxPerKm());
         if (scene.shows(Overlay.RINGS)) {
-            rings(g, view, farKm, step);
+            rings(g, view, farKm, step, letters);
         }
         if (scene.shows(Overlay.CEILING)) {
             ceiling(g, scene);
         }
         if (scene.shows(Overlay.AZIMUTHS)) {
-            azimuths(g, view);
+            azimuths(g, view, letters);
         }
     }
 
@@ -44,25 +43,22 @@ final class GridPainter {
         return Math.min(1000, view.centre().lengthKm() + halfDiagonal);
     }
 
-    private static void rings(GraphicsContext g, ViewTransform view, double farKm, double step) {
+    private static void rings(GraphicsContext g, ViewTransform view, double farKm, double step,
+                              Letters letters) {
         double nearKm = Math.max(0, view.centre().lengthKm()
                 - Math.hypot(view.widthPx(), view.heightPx()) / 2 / view.pxPerKm());
         g.setStroke(Inks.GRID);
         for (double range : NiceSteps.multiples(Math.max(step, nearKm), farKm, step)) {
-            circle(g, view, range);
+            Lines.circle(g, view, CENTRE, range);
             // Along one bearing, so that the numbers read as a scale.
             Point at = Point.towards(45).times(range);
-            text(g, view.screenX(at), view.screenY(at), Words.number(range, step < 1 ? 1 : 0) + " km");
+            letters.plate(g, Words.number(range, step < 1 ? 1 : 0) + " km", view.screenX(at), view.screenY(at),
+                    Inks.GRID_TEXT);
         }
         double x = view.screenX(0);
         double y = view.screenY(0);
         g.strokeLine(x - 5, y, x + 5, y);
         g.strokeLine(x, y - 5, x, y + 5);
-    }
-
-    private static void circle(GraphicsContext g, ViewTransform view, double rangeKm) {
-        double r = rangeKm * view.pxPerKm();
-        g.strokeOval(view.screenX(0) - r, view.screenY(0) - r, 2 * r, 2 * r);
     }
 
     private static void ceiling(GraphicsContext g, PlaneScene scene) {
@@ -71,15 +67,15 @@ final class GridPainter {
                 scene.session().heightCeilingM());
         g.setStroke(Inks.CEILING);
         g.setLineDashes(Inks.FAINT);
-        circle(g, view, rangeKm);
+        Lines.circle(g, view, CENTRE, rangeKm);
         g.setLineDashes(Inks.SOLID);
         Point at = Point.towards(225).times(rangeKm);
-        text(g, view.screenX(at), view.screenY(at), "beam " + Words.number(scene.session().heightCeilingM() / 1000, 1)
-                + " km up");
+        scene.letters().plate(g, "beam " + Words.number(scene.session().heightCeilingM() / 1000, 1) + " km up",
+                view.screenX(at), view.screenY(at), Inks.CEILING);
     }
 
     /** Ticks where the bearings from the radar leave the view. */
-    private static void azimuths(GraphicsContext g, ViewTransform view) {
+    private static void azimuths(GraphicsContext g, ViewTransform view, Letters letters) {
         double x0 = view.screenX(0);
         double y0 = view.screenY(0);
         boolean inside = x0 > 0 && y0 > 0 && x0 < view.widthPx() && y0 < view.heightPx();
@@ -94,8 +90,9 @@ final class GridPainter {
             double x = x0 + reach * way.xKm();
             double y = y0 - reach * way.yKm();
             g.strokeLine(x, y, x - 7 * way.xKm(), y + 7 * way.yKm());
-            text(g, Math.max(16, Math.min(view.widthPx() - 16, x - 20 * way.xKm())),
-                    Math.max(9, Math.min(view.heightPx() - 9, y + 16 * way.yKm())), Words.bearing(bearing));
+            double half = 17 * letters.scale();
+            letters.plate(g, Words.bearing(bearing), Math.max(half, Math.min(view.widthPx() - half, x - 20 * way.xKm())),
+                    Math.max(9, Math.min(view.heightPx() - 9, y + 16 * way.yKm())), Inks.GRID_TEXT);
         }
     }
 
@@ -118,7 +115,7 @@ final class GridPainter {
         return leave > enter ? leave : Double.NaN;
     }
 
-    private static void graticule(GraphicsContext g, ViewTransform view, GeoPoint radar) {
+    private static void graticule(GraphicsContext g, ViewTransform view, GeoPoint radar, Letters letters) {
         LocalPlane plane = new LocalPlane(radar);
         GeoPoint middle = plane.toGeo(view.centre());
         double step = NiceSteps.step(LEAST_GRATICULE_PX / view.pxPerKm() / 111.2);
@@ -134,14 +131,15 @@ final class GridPainter {
         for (double latitude : NiceSteps.multiples(south, north, step)) {
             curve(g, view, plane, latitude, west, latitude, east);
             Point at = plane.toPlane(new GeoPoint(latitude, wrapped(middle.longitudeDeg())));
-            text(g, 30, view.screenY(at), Words.number(Math.abs(latitude), decimals) + (latitude < 0 ? "\u00b0S" : "\u00b0N"));
+            letters.plate(g, Words.number(Math.abs(latitude), decimals) + (latitude < 0 ? "\u00b0S" : "\u00b0N"), 66,
+                    view.screenY(at), Inks.GRID_TEXT);
         }
         for (double longitude : NiceSteps.multiples(west, east, step)) {
             curve(g, view, plane, south, longitude, north, longitude);
             Point at = plane.toPlane(new GeoPoint(middle.latitudeDeg(), wrapped(longitude)));
             double shown = wrapped(longitude);
-            text(g, view.screenX(at), view.heightPx() - 26,
-                    Words.number(Math.abs(shown), decimals) + (shown < 0 ? "\u00b0W" : "\u00b0E"));
+            letters.plate(g, Words.number(Math.abs(shown), decimals) + (shown < 0 ? "\u00b0W" : "\u00b0E"),
+                    view.screenX(at), view.heightPx() - 44, Inks.GRID_TEXT);
         }
     }
 
@@ -162,15 +160,5 @@ final class GridPainter {
     private static double wrapped(double longitudeDeg) {
         double turned = (longitudeDeg + 180) % 360;
         return (turned < 0 ? turned + 360 : turned) - 180;
-    }
-
-    private static void text(GraphicsContext g, double x, double y, String words) {
-        g.setTextAlign(TextAlignment.CENTER);
-        g.setTextBaseline(VPos.CENTER);
-        g.setFill(Inks.CASING);
-        double half = 3.4 * words.length() + 3;
-        g.fillRoundRect(x - half, y - 7, 2 * half, 14, 6, 6);
-        g.setFill(Inks.GRID_TEXT);
-        g.fillText(words, x, y);
     }
 }

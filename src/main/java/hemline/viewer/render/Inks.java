@@ -3,10 +3,8 @@ package hemline.viewer.render;
 import hemline.boundary.Track;
 import java.util.List;
 import javafx.scene.paint.Color;
-import javafx.scene.text.Font;
-import javafx.scene.text.FontWeight;
 
-/** Colours, line patterns and letters of everything drawn over a sweep. */
+/** Colours and line patterns of everything drawn over a sweep. */
 public final class Inks {
     /** Under a line, so that it shows on light echo as well as on dark. */
     public static final Color CASING = Color.web("#05070c", 0.75);
@@ -22,8 +20,6 @@ public final class Inks {
     static final double[] HAND = {9, 5};
     static final double[] ARC_FIT = {2, 5};
     static final double[] FAINT = {3, 5};
-    static final Font LABEL = Font.font("System", FontWeight.BOLD, 12);
-    static final Font SMALL = Font.font("System", 11);
     /** Warm and saturated, which the sweep's own colours are not; they differ in lightness too. */
     private static final List<Color> TRACKS = List.of(Color.web("#ff9a1f"), Color.web("#ff4f9a"), Color.web("#ffe45c"),
             Color.web("#ff5b3a"), Color.web("#d79bff"), Color.web("#ffc39a"));

@@ -17,13 +17,12 @@ import javafx.scene.text.TextAlignment;
 
 /** Name and speed beside each boundary of the shown sweep, where no other label stands. */
 final class LabelPainter {
-    private static final double HEIGHT_PX = 17;
     private static final double OFF_PX = 20;
     /** Shares of the line's length at which a label is tried, best first. */
     private static final double[] PLACES = {0.5, 0.35, 0.65, 0.2, 0.8, 0.05, 0.95};
 
-    void paint(GraphicsContext g, PlaneScene scene) {
-        List<Rectangle2D> taken = new ArrayList<>();
+    /** @param taken where words stand already; grows by those drawn here */
+    void paint(GraphicsContext g, PlaneScene scene, List<Rectangle2D> taken) {
         List<Track> order = new ArrayList<>(scene.session().tracks());
         order.sort(Comparator.comparing(t -> !scene.isSelected(t)));
         for (Track track : order) {
@@ -36,8 +35,8 @@ final class LabelPainter {
     private static void label(GraphicsContext g, PlaneScene scene, Track track, TrackPiece piece,
                               List<Rectangle2D> taken) {
         String words = track.id() + (track.speed().isKnown() ? "  " + Words.number(track.speed().speedMs(), 1) : "");
-        double width = 7.4 * words.length() + 10;
-        Optional<Rectangle2D> place = free(scene.view(), piece, width, taken);
+        double width = scene.letters().width(words, scene.letters().label()) + 10;
+        Optional<Rectangle2D> place = free(scene, piece, width, taken);
         if (place.isEmpty()) {
             return;
         }
@@ -49,7 +48,7 @@ final class LabelPainter {
             Lines.pen(g, Inks.SELECTED, 1.2);
             g.strokeRoundRect(box.getMinX(), box.getMinY(), box.getWidth(), box.getHeight(), 7, 7);
         }
-        g.setFont(Inks.LABEL);
+        g.setFont(scene.letters().label());
         g.setTextAlign(TextAlignment.CENTER);
         g.setTextBaseline(VPos.CENTER);
         g.setFill(Inks.of(track, scene.session().tracks()));
@@ -57,8 +56,10 @@ final class LabelPainter {
     }
 
     /** Behind the line first, where no arrow runs; then ahead of it. */
-    private static Optional<Rectangle2D> free(ViewTransform view, TrackPiece piece, double width,
+    private static Optional<Rectangle2D> free(PlaneScene scene, TrackPiece piece, double width,
                                               List<Rectangle2D> taken) {
+        ViewTransform view = scene.view();
+        double height = scene.letters().lineHeight() + 2;
         List<TrackVertex> vertices = piece.vertices();
         for (double side : new double[] {-1, 1}) {
             for (double share : PLACES) {
@@ -66,9 +67,9 @@ final class LabelPainter {
                 double bearing = Double.isFinite(vertex.normalBearingDeg()) ? vertex.normalBearingDeg() : 180;
                 Point way = Point.towards(bearing).times(side);
                 double x = view.screenX(vertex.position()) + way.xKm() * (OFF_PX + width / 2 - 10) - width / 2;
-                double y = view.screenY(vertex.position()) - way.yKm() * OFF_PX - HEIGHT_PX / 2;
-                Rectangle2D box = new Rectangle2D(x, y, width, HEIGHT_PX);
-                boolean inside = x >= 0 && y >= 0 && x + width <= view.widthPx() && y + HEIGHT_PX <= view.heightPx();
+                double y = view.screenY(vertex.position()) - way.yKm() * OFF_PX - height / 2;
+                Rectangle2D box = new Rectangle2D(x, y, width, height);
+                boolean inside = x >= 0 && y >= 0 && x + width <= view.widthPx() && y + height <= view.heightPx();
                 if (inside && taken.stream().noneMatch(box::intersects)) {
                     return Optional.of(box);
                 }

@@ -10,6 +10,8 @@ public final class LegendPainter {
     public static final double HEIGHT_PX = 16;
     private static final Color SAMPLE = Color.web("#ff9a1f");
 
+    private static final Letters LETTERS = new Letters(1);
+
     private LegendPainter() {
     }
 
@@ -18,7 +20,7 @@ public final class LegendPainter {
         switch (overlay) {
             case BOUNDARIES -> line(g, SAMPLE, 2.4, middle, Inks.SOLID);
             case LABELS -> {
-                g.setFont(Inks.LABEL);
+                g.setFont(LETTERS.label());
                 g.setFill(SAMPLE);
                 g.fillText("T01", 5, middle + 4);
             }
@@ -47,7 +49,7 @@ public final class LegendPainter {
             case AZIMUTHS -> {
                 Lines.pen(g, Inks.GRID_TEXT, 1);
                 g.strokeLine(12, 2, 12, 9);
-                g.setFont(Inks.SMALL);
+                g.setFont(LETTERS.small());
                 g.setFill(Inks.GRID_TEXT);
                 g.fillText("\u00b0", 16, 14);
             }

@@ -4,6 +4,8 @@ import hemline.boundary.Meeting;
 import hemline.geometry.Point;
 import hemline.viewer.viewmodel.ViewTransform;
 import hemline.viewer.viewmodel.Words;
+import java.util.List;
+import javafx.geometry.Rectangle2D;
 import javafx.geometry.VPos;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.text.TextAlignment;
@@ -15,7 +17,8 @@ import javafx.scene.text.TextAlignment;
 final class MeetingPainter {
     private static final double HALF_PX = 8;
 
-    void paint(GraphicsContext g, PlaneScene scene) {
+    /** @param taken where words stand; grows by those drawn here */
+    void paint(GraphicsContext g, PlaneScene scene, List<Rectangle2D> taken) {
         for (Meeting meeting : scene.session().meetings()) {
             if (!Lines.onScreen(scene.view(), meeting.place(), 100)) {
                 continue;
@@ -23,25 +26,30 @@ final class MeetingPainter {
             boolean selected = meeting.id().equals(scene.meeting());
             boolean past = meeting.timeMs() <= scene.nowMs() + 60_000;
             g.setGlobalAlpha(past || selected ? 1 : 0.55);
-            paint(g, scene.view(), meeting, selected);
+            paint(g, scene, meeting, selected, taken);
             g.setGlobalAlpha(1);
         }
     }
 
-    private static void paint(GraphicsContext g, ViewTransform view, Meeting meeting, boolean selected) {
+    private static void paint(GraphicsContext g, PlaneScene scene, Meeting meeting, boolean selected,
+                              List<Rectangle2D> taken) {
+        ViewTransform view = scene.view();
         double x = view.screenX(meeting.place());
         double y = view.screenY(meeting.place());
         ellipse(g, view, meeting);
         double half = selected ? HALF_PX + 3 : HALF_PX;
         diamond(g, x, y, half, meeting.status() == Meeting.Status.OBSERVED);
         String words = meeting.id() + "  " + Words.shortClock(meeting.timeMs());
-        g.setFont(Inks.LABEL);
+        g.setFont(scene.letters().label());
         g.setTextAlign(TextAlignment.LEFT);
         g.setTextBaseline(VPos.CENTER);
         Lines.pen(g, Inks.CASING, 3);
         g.strokeText(words, x + half + 5, y);
         g.setFill(Inks.MEETING);
         g.fillText(words, x + half + 5, y);
+        double height = scene.letters().lineHeight();
+        double width = scene.letters().width(words, scene.letters().label());
+        taken.add(new Rectangle2D(x - half, y - height / 2, 2 * half + 5 + width, height));
     }
 
     /** A diamond about a place; also used for the rail and the legend. */

@@ -1,6 +1,9 @@
 package hemline.viewer.render;
 
 import hemline.viewer.viewmodel.Overlay;
+import java.util.ArrayList;
+import java.util.List;
+import javafx.geometry.Rectangle2D;
 import javafx.scene.canvas.GraphicsContext;
 
 /** Draws all overlays of a scene in their order, from the ground up. */
@@ -18,6 +21,7 @@ public final class OverlayPainter {
     public void paint(GraphicsContext g, PlaneScene scene) {
         g.clearRect(0, 0, scene.view().widthPx(), scene.view().heightPx());
         g.save();
+        List<Rectangle2D> taken = new ArrayList<>();
         grid.paint(g, scene);
         if (scene.shows(Overlay.EARLIER)) {
             earlier.paint(g, scene);
@@ -32,10 +36,10 @@ public final class OverlayPainter {
             boundaries.paint(g, scene);
         }
         if (scene.shows(Overlay.MEETINGS)) {
-            meetings.paint(g, scene);
+            meetings.paint(g, scene, taken);
         }
         if (scene.shows(Overlay.LABELS)) {
-            labels.paint(g, scene);
+            labels.paint(g, scene, taken);
         }
         measure.paint(g, scene);
         g.restore();

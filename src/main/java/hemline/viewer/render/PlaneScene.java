@@ -19,10 +19,10 @@ import java.util.Set;
  * @param track    id of the selected track, empty for none
  * @param meeting  id of the selected meeting, empty for none
  * @param marks    of the measure tool, none to two
- * @param moving   true while the user drags or zooms: costly detail may be left out
+ * @param letters  fonts at the user's text size
  */
 public record PlaneScene(LoopSession session, int index, ViewTransform view, Set<Overlay> shown, String track,
-                         String meeting, List<Mark> marks, boolean moving) {
+                         String meeting, List<Mark> marks, Letters letters) {
 
     boolean shows(Overlay overlay) {
         return shown.contains(overlay);

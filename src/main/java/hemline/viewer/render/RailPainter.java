@@ -52,7 +52,7 @@ public final class RailPainter {
     }
 
     private static void times(GraphicsContext g, RailLayout layout, Chrome chrome, double height) {
-        g.setFont(Inks.SMALL);
+        g.setFont(chrome.letters().small());
         g.setTextAlign(TextAlignment.CENTER);
         g.setTextBaseline(VPos.CENTER);
         for (long tick : layout.scale().ticks(64)) {
@@ -86,7 +86,7 @@ public final class RailPainter {
         }
         if (bar.height() >= 11) {
             boolean within = width > 34;
-            g.setFont(Inks.SMALL);
+            g.setFont(chrome.letters().small());
             g.setTextBaseline(VPos.CENTER);
             g.setTextAlign(TextAlignment.LEFT);
             g.setFill(within ? Color.web("#101318") : chrome.text());

@@ -21,11 +21,11 @@ public final class ScalePainter {
     private static final double LOW_DBZ = ReflectivityScale.LOWEST_DBZ;
     private static final double HIGH_DBZ = ReflectivityScale.HIGHEST_DBZ;
 
-    public void paint(GraphicsContext g, PlaneField field, Optional<ReadOut> cursor, double height) {
+    public void paint(GraphicsContext g, PlaneField field, Optional<ReadOut> cursor, Letters letters, double height) {
         g.clearRect(0, 0, WIDTH_PX, height);
         g.setFill(Inks.faded(Color.web("#0b0e13"), 0.82));
         g.fillRoundRect(0, 0, WIDTH_PX, height, 10, 10);
-        g.setFont(Inks.SMALL);
+        g.setFont(letters.small());
         g.setTextBaseline(VPos.CENTER);
         g.setTextAlign(TextAlignment.LEFT);
         switch (field) {

@@ -17,19 +17,22 @@ public final class TracePainter {
     public static final double RIGHT_PX = 12;
     private static final double TOP_PX = 20;
     private static final double BOTTOM_PX = 17;
+    private static final double BOTTOM_BARE_PX = 6;
 
     /**
      * @param time    of the axis, from {@link #LEFT_PX} to {@link #RIGHT_PX} before the right edge
      * @param nowMs   time of the sweep shown
      * @param hovered sample to be read out; empty for none
      * @param ink     the track's colour
+     * @param timed   whether times are written under it; stacked traces need them once
      */
     public void paint(GraphicsContext g, Trace trace, TimeScale time, double nowMs, Optional<Trace.Sample> hovered,
-                      Color ink, Chrome chrome, double width, double height) {
+                      Color ink, Chrome chrome, boolean timed, double width, double height) {
+        double bottom = height - (timed ? BOTTOM_PX : BOTTOM_BARE_PX);
         Color colour = chrome.readable(ink);
         g.setFill(chrome.ground());
         g.fillRect(0, 0, width, height);
-        g.setFont(Inks.SMALL);
+        g.setFont(chrome.letters().small());
         g.setTextBaseline(VPos.CENTER);
         heading(g, trace, hovered, chrome, width);
         if (trace.samples().isEmpty()) {
@@ -38,13 +41,13 @@ public final class TracePainter {
             g.fillText(trace.none(), LEFT_PX, height / 2, width - LEFT_PX - RIGHT_PX);
             return;
         }
-        ValueScale value = ValueScale.of(trace, height - BOTTOM_PX, TOP_PX);
-        axes(g, time, value, chrome, width, height);
+        ValueScale value = ValueScale.of(trace, bottom, TOP_PX);
+        axes(g, time, value, chrome, timed, width, bottom);
         band(g, trace.samples(), time, value, colour);
         line(g, trace.samples(), time, value, colour);
         if (nowMs >= time.fromMs() && nowMs <= time.toMs()) {
             Lines.pen(g, chrome.mark(), 1.2);
-            g.strokeLine(time.x(nowMs), TOP_PX, time.x(nowMs), height - BOTTOM_PX);
+            g.strokeLine(time.x(nowMs), TOP_PX, time.x(nowMs), bottom);
         }
         hovered.ifPresent(sample -> {
             Lines.pen(g, chrome.text(), 1.5);
@@ -63,12 +66,12 @@ public final class TracePainter {
         });
     }
 
-    private static void axes(GraphicsContext g, TimeScale time, ValueScale value, Chrome chrome, double width,
-                             double height) {
+    private static void axes(GraphicsContext g, TimeScale time, ValueScale value, Chrome chrome, boolean timed,
+                             double width, double bottom) {
         Lines.pen(g, chrome.line(), 1);
         g.setFill(chrome.muted());
         g.setTextAlign(TextAlignment.RIGHT);
-        for (double tick : value.ticks(24)) {
+        for (double tick : value.ticks(17)) {
             double y = Math.round(value.y(tick)) + 0.5;
             g.strokeLine(LEFT_PX, y, width - RIGHT_PX, y);
             g.fillText(Words.number(tick, Math.abs(tick - Math.rint(tick)) > 1e-6 ? 1 : 0), LEFT_PX - 5, y);
@@ -76,8 +79,10 @@ public final class TracePainter {
         g.setTextAlign(TextAlignment.CENTER);
         for (long tick : time.ticks(58)) {
             double x = time.x(tick);
-            g.strokeLine(x, height - BOTTOM_PX, x, height - BOTTOM_PX + 4);
-            g.fillText(Words.shortClock(tick), x, height - 7);
+            g.strokeLine(x, bottom, x, bottom + 4);
+            if (timed) {
+                g.fillText(Words.shortClock(tick), x, bottom + BOTTOM_PX - 7);
+            }
         }
     }
 

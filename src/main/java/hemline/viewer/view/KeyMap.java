@@ -7,6 +7,7 @@ import java.util.Map;
 import javafx.scene.Scene;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.input.KeyEvent;
 
@@ -20,7 +21,11 @@ final class KeyMap {
     KeyMap(List<Action> actions) {
         for (Action action : actions) {
             for (String key : action.keys()) {
-                Action before = keys.put(KeyCombination.valueOf(key), action);
+                KeyCombination combination = KeyCombination.valueOf(key);
+                if (!(combination instanceof KeyCodeCombination)) {
+                    throw new IllegalArgumentException(action.id() + ": no key is called " + key);
+                }
+                Action before = keys.put(combination, action);
                 if (before != null) {
                     throw new IllegalArgumentException("key " + key + " is given to " + before.id() + " and " + action.id());
                 }

@@ -10,6 +10,7 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.value.ObservableValue;
 import javafx.collections.ObservableList;
 import javafx.collections.transformation.SortedList;
+import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableView;
@@ -17,6 +18,7 @@ import javafx.scene.control.Tooltip;
 import javafx.scene.input.Clipboard;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
+import javafx.scene.layout.VBox;
 
 /** One table of the ledger; its selection is the window's. */
 final class LedgerTable<R> {
@@ -70,18 +72,21 @@ final class LedgerTable<R> {
 
     private TableColumn<R, String> tableColumn(LedgerColumn<R> column) {
         TableColumn<R, String> made = new TableColumn<>();
-        Label heading = new Label(column.title());
-        heading.setTooltip(new Tooltip(column.heading() + ": " + column.tooltip()));
+        Label unit = new Label(column.unit());
+        unit.getStyleClass().add("muted");
+        VBox heading = new VBox(new Label(column.title()), unit);
+        heading.setAlignment(column.numeric() ? Pos.CENTER_RIGHT : Pos.CENTER_LEFT);
+        Tooltip.install(heading, new Tooltip(column.heading() + ": " + column.tooltip()));
+        // The column chooser and screen readers take the text; the header shows the graphic alone.
         made.setGraphic(heading);
-        // The column chooser and screen readers take the text, the header shows the graphic.
-        made.setText(column.unit().isEmpty() ? "" : column.unit());
+        made.setText(column.heading());
         made.setId("column-" + column.title());
         made.setCellValueFactory(row -> new ReadOnlyObjectWrapper<>(column.text().apply(row.getValue())));
         made.setUserData(column);
         if (column.numeric()) {
             made.getStyleClass().add("numeric");
         }
-        made.setPrefWidth(Math.max(48, 9.2 * Math.max(column.title().length(), 5) + 14));
+        made.setPrefWidth(Math.max(50, 7.6 * Math.max(column.title().length(), 4) + 20));
         return made;
     }
 

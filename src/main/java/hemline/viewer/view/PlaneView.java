@@ -1,6 +1,7 @@
 package hemline.viewer.view;
 
 import hemline.geometry.Point;
+import hemline.viewer.render.Letters;
 import hemline.viewer.render.OverlayPainter;
 import hemline.viewer.render.PlaneScene;
 import hemline.viewer.render.RasterFeed;
@@ -38,6 +39,7 @@ final class PlaneView extends Region {
     private final ImageView sweep = new ImageView();
     private final Canvas overlays = new Canvas();
     private final OverlayPainter painter = new OverlayPainter();
+    private Letters letters = new Letters(1);
     private final Redraw redraw = new Redraw(this::paint);
     private double pressX;
     private double pressY;
@@ -78,6 +80,10 @@ final class PlaneView extends Region {
         for (Overlay overlay : Overlay.values()) {
             redraw.on(model.overlays().shown(overlay));
         }
+        model.settings().textScaleProperty().addListener((o, was, now) -> {
+            letters = new Letters(now.doubleValue());
+            redraw.request();
+        });
         feed.rasterProperty().addListener((o, was, now) -> placeSweep());
         model.sweepTroubleProperty().addListener((o, was, now) -> placeSweep());
         model.measure().onProperty().addListener((o, was, now) -> setCursor(now ? Cursor.CROSSHAIR : Cursor.DEFAULT));
@@ -99,12 +105,12 @@ final class PlaneView extends Region {
         feed.want(model.store(), model.loop().index(), model.plane().fieldProperty().get(), model.plane().view(),
                 session.frames().size(), direction, scale);
         placeSweep();
-        painter.paint(overlays.getGraphicsContext2D(), scene(false));
+        painter.paint(overlays.getGraphicsContext2D(), scene());
         setAccessibleText(PlaneWords.of(model));
     }
 
     /** What the overlays are drawn from now. */
-    PlaneScene scene(boolean moving) {
+    PlaneScene scene() {
         Set<Overlay> shown = EnumSet.noneOf(Overlay.class);
         for (Overlay overlay : Overlay.values()) {
             if (model.overlays().isShown(overlay)) {
@@ -114,7 +120,7 @@ final class PlaneView extends Region {
         return new PlaneScene(model.session(), model.loop().index(), model.plane().view(), shown,
                 model.selection().track(), model.selection().meeting(),
                 Stream.of(model.measure().fromProperty().get(), model.measure().toProperty().get())
-                        .filter(Objects::nonNull).toList(), moving);
+                        .filter(Objects::nonNull).toList(), letters);
     }
 
     /** Lays the newest picture where its view lies in the present one. */

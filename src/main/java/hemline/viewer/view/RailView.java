@@ -17,6 +17,7 @@ final class RailView extends CanvasRegion {
     private RailLayout layout;
 
     RailView(ViewerModel model) {
+        super(model.settings());
         this.model = model;
         setId("rail");
         getStyleClass().add("rail");
@@ -24,8 +25,7 @@ final class RailView extends CanvasRegion {
         setFocusTraversable(true);
         setAccessibleRole(AccessibleRole.SLIDER);
         redraw().on(model.sessionProperty(), model.loop().indexProperty(), model.loop().firstProperty(),
-                model.loop().lastProperty(), model.selection().trackProperty(), model.selection().meetingProperty(),
-                model.settings().darkProperty());
+                model.loop().lastProperty(), model.selection().trackProperty(), model.selection().meetingProperty());
         setOnMousePressed(this::press);
         setOnMouseDragged(e -> scrub(e.getX()));
         setOnScroll(e -> {
@@ -75,7 +75,7 @@ final class RailView extends CanvasRegion {
     @Override
     void paint() {
         LoopSession session = model.session();
-        Chrome chrome = Chrome.of(model.settings().darkProperty().get());
+        Chrome chrome = chrome();
         if (session == null) {
             layout = null;
             var g = canvas().getGraphicsContext2D();

@@ -10,6 +10,7 @@ final class ScaleView extends CanvasRegion {
     private final ScalePainter painter = new ScalePainter();
 
     ScaleView(ViewerModel model) {
+        super(model.settings());
         this.model = model;
         setId("scale");
         setMouseTransparent(true);
@@ -23,6 +24,6 @@ final class ScaleView extends CanvasRegion {
     @Override
     void paint() {
         painter.paint(canvas().getGraphicsContext2D(), model.plane().fieldProperty().get(), model.readOut().get(),
-                getHeight());
+                chrome().letters(), getHeight());
     }
 }

@@ -28,7 +28,7 @@ final class ShortcutSheet extends VBox {
                 .forEach(a -> groups.computeIfAbsent(a.group(), g -> new ArrayList<>()).add(a));
         FlowPane columns = new FlowPane(Orientation.HORIZONTAL, 26, 14);
         groups.forEach((name, members) -> columns.getChildren().add(group(name, members)));
-        columns.setPrefWrapLength(900);
+        columns.setPrefWrapLength(1120);
         ScrollPane scroll = new ScrollPane(columns);
         scroll.setFitToWidth(true);
         VBox.setVgrow(scroll, Priority.ALWAYS);
@@ -41,7 +41,7 @@ final class ShortcutSheet extends VBox {
         done.setCancelButton(true);
         getChildren().addAll(scroll, note, done);
         setSpacing(8);
-        setMaxSize(1000, 620);
+        setMaxSize(1200, 640);
         setOnKeyPressed(e -> {
             if (e.getCode() == KeyCode.ESCAPE || e.getCode() == KeyCode.F1) {
                 close.run();

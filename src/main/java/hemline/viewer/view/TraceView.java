@@ -1,7 +1,6 @@
 package hemline.viewer.view;
 
 import hemline.boundary.Track;
-import hemline.viewer.render.Chrome;
 import hemline.viewer.render.Inks;
 import hemline.viewer.render.TracePainter;
 import hemline.viewer.viewmodel.TimeScale;
@@ -13,17 +12,21 @@ import javafx.scene.AccessibleRole;
 /** One trace of the selected track; hover reads it out, a click goes to that sweep. */
 final class TraceView extends CanvasRegion {
     private final ViewerModel model;
+    private final boolean timed;
     private final TracePainter painter = new TracePainter();
     private Track track;
     private Trace trace;
     private Optional<Trace.Sample> hovered = Optional.empty();
 
-    TraceView(ViewerModel model) {
+    /** @param timed whether times are written under it */
+    TraceView(ViewerModel model, boolean timed) {
+        super(model.settings());
+        this.timed = timed;
         this.model = model;
-        setMinHeight(70);
-        setPrefHeight(96);
+        setMinHeight(timed ? 55 : 46);
+        setPrefHeight(timed ? 99 : 88);
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
-        redraw().on(model.loop().indexProperty(), model.settings().darkProperty());
+        redraw().on(model.loop().indexProperty());
         setOnMouseMoved(e -> hover(e.getX()));
         setOnMouseExited(e -> {
             hovered = Optional.empty();
@@ -61,8 +64,8 @@ final class TraceView extends CanvasRegion {
         if (trace != null && model.session() != null) {
             painter.paint(canvas().getGraphicsContext2D(), trace, time(),
                     model.session().frames().get(model.loop().index()).meanTimeMs(), hovered,
-                    Inks.of(track, model.session().tracks()), Chrome.of(model.settings().darkProperty().get()),
-                    getWidth(), getHeight());
+                    Inks.of(track, model.session().tracks()), chrome(),
+                    timed, getWidth(), getHeight());
         }
     }
 }

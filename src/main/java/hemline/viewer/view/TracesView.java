@@ -26,7 +26,7 @@ final class TracesView extends StackPane {
         this.model = model;
         getStyleClass().add("traces");
         setId("traces");
-        views = Stream.generate(() -> new TraceView(model)).limit(4).toList();
+        views = Stream.of(false, false, false, true).map(timed -> new TraceView(model, timed)).toList();
         column = new VBox(heading);
         column.getChildren().addAll(views);
         views.forEach(view -> VBox.setVgrow(view, Priority.ALWAYS));

@@ -35,7 +35,7 @@ public record Action(String id, String group, String words, List<String> keys, O
     public String keyWords() {
         return keys.isEmpty() ? "" : keys.get(0).replace("Shortcut", "Ctrl").replace("Open Bracket", "[")
                 .replace("Close Bracket", "]").replace("Comma", ",").replace("Period", ".").replace("Equals", "+")
-                .replace("Minus", "\u2212").replace("Digit", "").replace("Esc", "Esc");
+                .replace("Minus", "\u2212");
     }
 
     /** How well what was typed fits, larger is better; 0 for not at all. Every word typed must occur. */

@@ -26,7 +26,7 @@ public final class StatusModel {
         SweepFrame newest = session.frames().get(session.frames().size() - 1);
         newestMs = endMs(newest.rays());
         reach.set("Nothing claimed beyond " + Words.number(ceilingRangeKm(newest.beam(), session.heightCeilingM()), 0)
-                + " km, where the beam is " + Words.number(session.heightCeilingM() / 1000, 1) + " km above the radar");
+                + " km: beam " + Words.number(session.heightCeilingM() / 1000, 1) + " km up");
         refresh(nowMs);
     }
 
@@ -38,9 +38,9 @@ public final class StatusModel {
         long ageMs = nowMs - newestMs;
         boolean archive = ageMs > ARCHIVE_MS;
         old.set(ageMs > OLD_MS && !archive);
-        String when = "Newest ray " + Words.date(newestMs) + " " + Words.clock(newestMs) + " UTC, ";
+        String when = "Newest data " + Words.date(newestMs) + " " + Words.clock(newestMs) + " UTC, ";
         if (ageMs < -60_000) {
-            age.set(when + Words.span(ageMs) + " ahead of this computer's clock");
+            age.set(when + Words.span(ageMs) + " ahead of the clock here");
         } else {
             age.set(when + Words.span(Math.max(0, ageMs)) + " old" + (archive ? " (archive)" : old.get() ? ": old" : ""));
         }

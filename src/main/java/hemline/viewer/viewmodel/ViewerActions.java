@@ -85,7 +85,7 @@ public final class ViewerActions {
         PlaneModel plane = model.plane();
         add("zoom-in", "Zoom in", open, plane::zoomIn, "Equals", "Shift+Equals", "Plus", "Add");
         add("zoom-out", "Zoom out", open, plane::zoomOut, "Minus", "Subtract");
-        add("fit", "Fit the plane to the beam's useful reach", open, plane::fit, "Digit0", "Numpad0");
+        add("fit", "Fit the plane to the beam's useful reach", open, plane::fit, "0", "Numpad_0");
         add("west", "Look further west", open, () -> plane.panStep(-1, 0), "Left");
         add("east", "Look further east", open, () -> plane.panStep(1, 0), "Right");
         add("north", "Look further north", open, () -> plane.panStep(0, 1), "Up");
@@ -93,7 +93,7 @@ public final class ViewerActions {
         for (PlaneField field : PlaneField.values()) {
             ObservableBooleanValue on = plane.fieldProperty().isEqualTo(field);
             actions.add(new Action("field-" + field.name().toLowerCase(Locale.ROOT), group,
-                    "Show field: " + field.words().toLowerCase(Locale.ROOT), List.of("Digit" + (1 + field.ordinal())),
+                    "Show field: " + field.words().toLowerCase(Locale.ROOT), List.of(String.valueOf(1 + field.ordinal())),
                     offered(field), Optional.of(on), () -> plane.fieldProperty().set(field)));
         }
         add("fainter", "Make the sweep fainter", open, () -> plane.opacityProperty().set(

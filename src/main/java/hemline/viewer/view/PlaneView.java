@@ -123,6 +123,13 @@ final class PlaneView extends Region {
                         .filter(Objects::nonNull).toList(), letters);
     }
 
+    /** Whether the picture is of the sweep, field and view wanted, rather than an earlier one stretched. */
+    boolean isSharp() {
+        SweepRaster raster = feed.rasterProperty().get();
+        return raster != null && raster.view().equals(model.plane().view()) && raster.index() == model.loop().index()
+                && raster.field() == model.plane().fieldProperty().get();
+    }
+
     /** Lays the newest picture where its view lies in the present one. */
     private void placeSweep() {
         SweepRaster raster = feed.rasterProperty().get();

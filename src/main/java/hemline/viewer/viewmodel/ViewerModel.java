@@ -14,6 +14,7 @@ import java.time.Clock;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.CompletionException;
 import java.util.concurrent.Executor;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.ObjectBinding;
@@ -122,9 +123,10 @@ public final class ViewerModel {
             if (failure == null) {
                 take(held);
             } else {
-                Throwable cause = failure.getCause() == null ? failure : failure.getCause();
+                Throwable cause = failure instanceof CompletionException ? failure.getCause() : failure;
                 shown.set(null);
-                sweepTrouble.set("Sweep " + (wanted + 1) + " could not be read: " + cause.getMessage());
+                sweepTrouble.set("Sweep " + (wanted + 1) + " could not be read: " + (cause.getMessage() == null
+                        ? cause.getClass().getSimpleName() : cause.getMessage()));
             }
         }));
     }

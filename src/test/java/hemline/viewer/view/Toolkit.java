@@ -20,6 +20,12 @@ import org.testfx.util.WaitForAsyncUtils;
 
 /** One viewer window under the headless toolkit, with questions answered by the test. */
 final class Toolkit implements WindowDesk.Ask, AutoCloseable {
+    static {
+        // The robot's usual pauses are for people who watch.
+        System.setProperty("testfx.robot.move_max_count", "3");
+        System.setProperty("testfx.robot.write_sleep", "0");
+    }
+
     final FakeOpener opener;
     final ViewerModel model;
     final ViewerWindow window;

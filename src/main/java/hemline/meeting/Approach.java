@@ -1,13 +1,16 @@
 package hemline.meeting;
 
+import hemline.geometry.Point;
 import java.util.List;
 
 /**
  * How near two sets of lines come to each other at one time, each vertex carried along its normal to that time.
  *
  * @param gapKm     shortest distance, km
- * @param x         middle of the gap, km east
- * @param y         km north
+ * @param onA       where the first line is there, km
+ * @param onB       where the second is
+ * @param velocityA motion of the first there, m s⁻¹
+ * @param velocityB motion of the second
  * @param closingMs rate at which the gap closes from both lines' motion, m s⁻¹
  * @param sdMs      its standard deviation, m s⁻¹
  * @param turnDeg   angle between the directions of motion there, degrees in [0, 180]
@@ -16,7 +19,7 @@ import java.util.List;
  * @param alongY    north
  * @param carrySdKm standard deviation of the gap from ends that had to be carried on, km
  */
-record Approach(double gapKm, double x, double y, double closingMs, double sdMs, double turnDeg, double crossDeg,
+record Approach(double gapKm, Point onA, Point onB, Point velocityA, Point velocityB, double closingMs, double sdMs, double turnDeg, double crossDeg,
                 double alongX, double alongY, double carrySdKm) {
     /** Standard deviation of where a line carried on beyond its end is: grows along it and with its square, km. */
     private static final double CARRY_SD = 0.05;
@@ -49,9 +52,9 @@ record Approach(double gapKm, double x, double y, double closingMs, double sdMs,
         return best;
     }
 
-    /** The same place with the closing speed of an earlier approach: once lines touch, theirs is muddled. */
-    Approach withClosing(Approach earlier) {
-        return new Approach(gapKm, x, y, earlier.closingMs, earlier.sdMs, turnDeg, crossDeg, alongX, alongY, carrySdKm);
+    /** Where the lines are found at once after a wait, each having moved on at its own speed. */
+    Point placeAfter(double waitS) {
+        return onA.plus(velocityA.times(waitS / 1000)).plus(onB).plus(velocityB.times(waitS / 1000)).times(0.5);
     }
 
     private static double carrySdKm(double carriedKm) {
@@ -78,7 +81,8 @@ record Approach(double gapKm, double x, double y, double closingMs, double sdMs,
         ux /= length;
         uy /= length;
         double closing = (a.velocityX()[i] - b.velocityX()[j]) * ux + (a.velocityY()[i] - b.velocityY()[j]) * uy;
-        return new Approach(gap, 0.5 * (ends[0] + ends[2]), 0.5 * (ends[1] + ends[3]), closing,
+        return new Approach(gap, new Point(ends[0], ends[1]), new Point(ends[2], ends[3]),
+                new Point(a.velocityX()[i], a.velocityY()[i]), new Point(b.velocityX()[j], b.velocityY()[j]), closing,
                 Math.hypot(a.sdMs()[i], b.sdMs()[j]), turn, turn > 90 ? 180 - turn : turn, -uy, ux, carried);
     }
 }

@@ -44,7 +44,7 @@ final class ObservedMeetings {
                 continue;
             }
             if (now.gapKm() + now.carrySdKm() <= settings.contactKm()) {
-                return before == null ? Optional.empty() : Optional.of(touched(a, b, before, beforeS, now, timeS(k)));
+                return before == null ? Optional.empty() : Optional.of(touched(a, b, before, beforeS, timeS(k)));
             }
             before = now;
             beforeS = timeS(k);
@@ -66,12 +66,10 @@ final class ObservedMeetings {
     }
 
     /** Contact between a sweep that shows a gap and one that shows none, by the speed at which the gap closed. */
-    private Meeting touched(Track a, Track b, Approach apart, double apartS, Approach together, double togetherS) {
+    private Meeting touched(Track a, Track b, Approach apart, double apartS, double togetherS) {
         double waitS = 1000 * apart.gapKm() / Math.max(LEAST_CLOSING_MS, apart.closingMs());
         double timeS = Math.min(apartS + waitS, togetherS);
-        double share = (timeS - apartS) / (togetherS - apartS);
-        Approach nearer = share < 0.7 ? apart : together;
-        return meeting(a, b, nearer == apart ? apart : together.withClosing(apart), timeS, timeS - apartS);
+        return meeting(a, b, apart, timeS, timeS - apartS);
     }
 
     private List<MovingLine> lines(List<TrackPiece> pieces, Track track) {
@@ -96,7 +94,7 @@ final class ObservedMeetings {
         double along = Math.max(across, across / Math.max(0.1, Math.sin(Math.toRadians(near.crossDeg()))));
         double bearing = new Point(near.alongX(), near.alongY()).bearingDeg() % 180;
         return new Meeting("-", a.id(), b.id(), originMs + Math.round(1000 * timeS), sdS,
-                new Point(near.x(), near.y()), new Meeting.Ellipse(along, across, bearing), near.crossDeg(),
+                near.placeAfter(waitS), new Meeting.Ellipse(along, across, bearing), near.crossDeg(),
                 new Speed(closing, near.sdMs()), Meeting.Status.OBSERVED, 1);
     }
 }

@@ -40,8 +40,8 @@ public final class Tracking {
         progress.check();
         List<Piece> pieces = PieceCutter.cut(cloud, motion);
         List<PieceLinks.Link> links = new PieceLinks(cloud, motion, cells, pieces, settings).links(pieces);
-        GroupArcs arcs = new GroupArcs(cloud, motion, pieces);
-        List<List<Integer>> groups = arcs.joinSiblings(new Grouping(LEAST_SHARE, arcs::mayJoin).group(pieces, links));
+        Siblings siblings = new Siblings(cloud, motion, pieces);
+        List<List<Integer>> groups = siblings.join(new Grouping(LEAST_SHARE, siblings::mayJoin).group(pieces, links));
         progress.step("linking", 2, 3);
         progress.check();
         TrackBuilder builder = new TrackBuilder(cloud, motion, frames);

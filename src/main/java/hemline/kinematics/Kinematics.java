@@ -11,6 +11,9 @@ public final class Kinematics {
     /** Sweep intervals on either side that a speed is fitted over at least. */
     private static final double LEAST_INTERVALS = 1.3;
 
+    /** A shape that slides slower than this along itself is fitted as one that does not, m s⁻¹. */
+    private static final double LEAST_SLIDE_MS = 2;
+
     private Kinematics() {
     }
 
@@ -37,11 +40,21 @@ public final class Kinematics {
     private static Track measure(Track track, TrackPoints points, int number, OpposedLines opposed, double leastSpanS,
                                  long originMs, KinematicsSettings settings) {
         LocalMotion local = new LocalMotion(points, settings.halfLengthKm(), settings.halfSpanS(), leastSpanS);
+        LocalMotion.Local[] found = new LocalMotion.Local[points.size];
+        for (int i = 0; i < points.size; i++) {
+            found[i] = opposed.near(number, i) ? null : local.at(i, 0);
+        }
+        double[] slide = new Sliding(points, found).alongMs();
+        for (int i = 0; i < points.size; i++) {
+            if (found[i] != null && Math.abs(slide[i]) >= LEAST_SLIDE_MS) {
+                found[i] = local.at(i, slide[i]);
+            }
+        }
         VertexMotion[] motion = new VertexMotion[points.size];
         double sum = 0;
         int known = 0;
         for (int i = 0; i < points.size; i++) {
-            LocalMotion.Local one = opposed.near(number, i) ? null : local.at(i);
+            LocalMotion.Local one = found[i];
             motion[i] = one == null ? VertexMotion.unknown(points.normalX[i], points.normalY[i])
                     : VertexMotion.along(points.normalX[i], points.normalY[i], one.speedMs(), one.sdMs());
             if (one != null) {

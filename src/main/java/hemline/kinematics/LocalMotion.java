@@ -28,11 +28,15 @@ final class LocalMotion {
     /** Speed error that no number of sweeps removes: bends, unsteadiness, m s⁻¹. */
     private static final double FLOOR_MS = 0.15;
 
+    /** Slope of waves too short to be resolved, which a shape that slides along itself turns into speed. */
+    private static final double WAVINESS = 0.07;
+
     private final TrackPoints points;
     private final double halfLengthKm;
     private final double halfSpanS;
     private final double leastSpanS;
     private double spanS;
+    private double slideMs;
     private final NormalEquations equations = new NormalEquations(UNKNOWNS);
     private final double[] solved = new double[UNKNOWNS];
     private final double[][] covariance = new double[UNKNOWNS][UNKNOWNS];
@@ -63,8 +67,14 @@ final class LocalMotion {
     record Local(double offsetKm, double speedMs, double sdMs) {
     }
 
-    /** The motion at a vertex; null when fewer than two sweeps show the line there. */
-    Local at(int i) {
+    /**
+     * The motion at a vertex; null when fewer than two sweeps show the line there.
+     *
+     * @param alongMs speed at which the line's shape slides along itself, in the direction of the tangent 90 degrees
+     *                to the left of the normal, m s⁻¹: the fit follows it, so that a bend stays where it is
+     */
+    Local at(int i, double alongMs) {
+        slideMs = alongMs;
         spanS = halfSpanS;
         Local wide = fit(i);
         if (wide == null) {
@@ -138,13 +148,14 @@ final class LocalMotion {
             if (Math.abs(span) > spanS + 60) {
                 continue;
             }
-            double reach = Math.hypot(halfLengthKm, MAX_SPEED_MS * Math.abs(span) / 1000 + 2);
+            double reach = Math.hypot(halfLengthKm + Math.abs(slideMs * span) / 1000,
+                    MAX_SPEED_MS * Math.abs(span) / 1000 + 2);
             points.grid(g).within(points.x[i], points.y[i], reach, j -> {
                 double dx = points.x[j] - points.x[i];
                 double dy = points.y[j] - points.y[i];
-                double along = -dx * ny + dy * nx;
                 double turn = nx * points.normalX[j] + ny * points.normalY[j];
                 double time = (points.timeS[j] - points.timeS[i]) / 1000;
+                double along = -dx * ny + dy * nx - slideMs * time;
                 if (Math.abs(along) <= halfLengthKm && turn > TURN_COS && Math.abs(time) * 1000 <= spanS) {
                     double off = dx * nx + dy * ny;
                     if (Math.abs(off) <= MAX_SPEED_MS * Math.abs(time) + 2) {
@@ -207,6 +218,6 @@ final class LocalMotion {
             }
         }
         double ratio = (residuals / square(SHARED_KM) + PRIOR_SWEEPS) / (Math.max(0, sweeps - 2) + PRIOR_SWEEPS);
-        return Math.sqrt(square(FLOOR_MS) + ratio * covariance[1][1]);
+        return Math.sqrt(square(FLOOR_MS) + square(WAVINESS * slideMs) + ratio * covariance[1][1]);
     }
 }

@@ -14,7 +14,7 @@ import java.util.List;
  */
 final class TrackPoints {
     /** Half length over which a direction is taken, km. */
-    private static final double DIRECTION_KM = 3;
+    private static final double DIRECTION_KM = 2;
 
     final int size;
     final double[] x;
@@ -96,6 +96,11 @@ final class TrackPoints {
 
     int gridCount() {
         return grids.length;
+    }
+
+    /** First vertex of held sweep {@code g}; for the number of held sweeps, the number of vertices. */
+    int gridStart(int g) {
+        return gridFrom[g];
     }
 
     PointGrid grid(int g) {

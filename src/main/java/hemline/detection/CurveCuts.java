@@ -18,6 +18,8 @@ final class CurveCuts {
     private static final double MOST_ROUGH_DB = 2.9;
     private static final double END_LINE_DB = 1.5;
     private static final double END_STEP_DB = 3;
+    /** On a step the curve lies part way up; lower than this share below the brighter side it is the foot of a line. */
+    private static final double STEP_SAG = 0.65;
     private static final int BRIDGED = 2;
 
     private CurveCuts() {
@@ -52,6 +54,9 @@ final class CurveCuts {
             return false;
         }
         if (m.rainKm()[i] < RAIN_EDGE_KM && m.rainAhead()[i] && !(m.lineDb()[i] >= RAIN_EDGE_LINE_DB)) {
+            return false;
+        }
+        if (m.lineDb()[i] < -STEP_SAG * m.stepDb()[i] && m.lineDb()[i] < 0) {
             return false;
         }
         return m.crestDbz()[i] <= MOST_CREST_DBZ && (m.lineDb()[i] >= LEAST_LINE_DB || m.stepDb()[i] >= LEAST_STEP_DB);

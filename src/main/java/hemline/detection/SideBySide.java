@@ -8,6 +8,9 @@ import java.util.List;
 final class SideBySide {
     private static final double WITHIN_KM = 6;
     private static final double ALONG_KM = 2.5;
+    /** A line this near to one much stronger is its shadow whichever way it seems to move. */
+    private static final double SHADOW_KM = 4;
+    private static final double SHADOW_SHARE = 0.6;
     private static final double COSINE = Math.cos(Math.toRadians(35));
 
     private SideBySide() {
@@ -49,7 +52,10 @@ final class SideBySide {
                 double across = dx * other.normalX()[j] + dy * other.normalY()[j];
                 double along = Math.abs(dx * other.normalY()[j] - dy * other.normalX()[j]);
                 double cosine = curve.normalX()[i] * other.normalX()[j] + curve.normalY()[i] * other.normalY()[j];
-                if (Math.abs(across) <= WITHIN_KM && along <= ALONG_KM && cosine > COSINE) {
+                boolean alike = Math.abs(across) <= WITHIN_KM && cosine > COSINE;
+                boolean shadow = Math.abs(across) <= SHADOW_KM && Math.abs(cosine) > COSINE
+                        && curve.evidence()[i] < SHADOW_SHARE * other.evidence()[j];
+                if (along <= ALONG_KM && (alike || shadow)) {
                     return true;
                 }
             }

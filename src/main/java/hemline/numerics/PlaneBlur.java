@@ -4,12 +4,12 @@ package hemline.numerics;
  * Gaussian smoothing of a plane {@code [height][width]} of flat floats; outside counts as zero, so that smoothing
  * values times weights and weights alone and dividing gives a normalised mean.
  *
- * <p>Up to a standard deviation of 2.5 pixels the kernel is sampled out to three standard deviations and scaled to a
+ * <p>Up to a standard deviation of 4 pixels the kernel is sampled out to three standard deviations and scaled to a
  * sum of one; beyond, three running means whose variances add up to the wanted one stand in (error of the profile
  * under 3 % of its peak).
  */
 public final class PlaneBlur {
-    private static final double SAMPLED_UP_TO = 2.5;
+    private static final double SAMPLED_UP_TO = 4;
 
     private PlaneBlur() {
     }

@@ -4,16 +4,16 @@ import java.util.Arrays;
 
 /**
  * Narrow radial streaks: interference, the sun, other transmitters. A ray's kilometre is streaky when it stands
- * 4 dB over both the sectors 2.5° to its left and right; a stretch is a streak when more than 55 % of 25 km is streaky,
+ * 4 dB over both the sectors 2.5° to its left and right; a stretch is a streak when more than 65 % of 40 km is streaky,
  * a whole ray when more than 40 % of it beyond 20 km is. Wide rain stands over neither side and survives.
  */
 final class RadialStreaks {
     private static final float OVER_DB = 4;
     private static final double SIDE_DEG = 2.5;
     private static final double SIDE_HALF_DEG = 0.75;
-    private static final double WINDOW_SHARE = 0.55;
+    private static final double WINDOW_SHARE = 0.65;
     private static final double RAY_SHARE = 0.4;
-    private static final int WINDOW_KM = 25;
+    private static final int WINDOW_KM = 40;
     private static final int FROM_KM = 20;
 
     private final PolarGates polar;

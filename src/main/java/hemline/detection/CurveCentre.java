@@ -35,7 +35,7 @@ final class CurveCentre {
             y[i] = curve.y()[i] + agreed[i] * curve.normalY()[i];
         }
         return new TracedCurve(x, y, curve.normalX(), curve.normalY(), curve.speedMs(), curve.evidence())
-                .withOwnNormals();
+                .smoothed();
     }
 
     private static void locate(double[] profile, int i, double[] offset, double[] weight) {

@@ -29,7 +29,7 @@ final class SweepDetector {
         Significance significance = new Significance(stack);
         List<TracedCurve> parts = new ArrayList<>();
         for (TracedCurve rough : CurveTracer.trace(stack, fewest, LEAST_MEAN)) {
-            TracedCurve smooth = rough.withOwnNormals();
+            TracedCurve smooth = rough.smoothed();
             TracedCurve curve = CurveCentre.refined(smooth,
                     CurveProfiles.of(raster, smooth, CurveProfiles.ALONG_KM));
             CurveMeasures measures = CurveMeasures.of(curve,
@@ -45,7 +45,7 @@ final class SweepDetector {
             if (kept[1] - kept[0] < fewest) {
                 continue;
             }
-            TracedCurve curve = part.part(kept[0], kept[1]).withOwnNormals();
+            TracedCurve curve = part.part(kept[0], kept[1]);
             double logFalse = significance.logExpectedFalse(curve.meanEvidence(), curve.size() - 1);
             if (logFalse <= Math.log10(settings.expectedFalse())) {
                 CurveMeasures measures = CurveMeasures.of(curve,

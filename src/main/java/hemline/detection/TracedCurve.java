@@ -12,6 +12,9 @@ package hemline.detection;
  */
 record TracedCurve(double[] x, double[] y, double[] normalX, double[] normalY, double[] speedMs, double[] evidence) {
 
+    /** Vertices on either side that a vertex is smoothed with. */
+    private static final int SMOOTHED_OVER = 4;
+
     int size() {
         return x.length;
     }
@@ -31,21 +34,50 @@ record TracedCurve(double[] x, double[] y, double[] normalX, double[] normalY, d
                 java.util.Arrays.copyOfRange(speedMs, from, to), java.util.Arrays.copyOfRange(evidence, from, to));
     }
 
-    /** Normals of the line through the vertices, three on either side, signed as before. */
-    TracedCurve withOwnNormals() {
+    /**
+     * Vertices moved onto parabolas fitted to those within {@link #SMOOTHED_OVER} on either side, and normals across
+     * them, signed as before.
+     */
+    TracedCurve smoothed() {
         int n = size();
-        double[] nx = new double[n];
-        double[] ny = new double[n];
+        double[][] fitted = new double[4][n];
         for (int i = 0; i < n; i++) {
-            int a = Math.max(0, i - 3);
-            int b = Math.min(n - 1, i + 3);
-            double tx = x[b] - x[a];
-            double ty = y[b] - y[a];
-            double length = Math.hypot(tx, ty);
-            double sign = -ty * normalX[i] + tx * normalY[i] < 0 ? -1 : 1;
-            nx[i] = length > 0 ? -ty / length * sign : normalX[i];
-            ny[i] = length > 0 ? tx / length * sign : normalY[i];
+            int from = Math.max(0, Math.min(i - SMOOTHED_OVER, n - 1 - 2 * SMOOTHED_OVER));
+            int to = Math.min(n - 1, Math.max(i + SMOOTHED_OVER, 2 * SMOOTHED_OVER));
+            double[] px = parabola(x, from, to, i);
+            double[] py = parabola(y, from, to, i);
+            fitted[0][i] = px[0];
+            fitted[1][i] = py[0];
+            double length = Math.hypot(px[1], py[1]);
+            double sign = -py[1] * normalX[i] + px[1] * normalY[i] < 0 ? -1 : 1;
+            fitted[2][i] = length > 1e-9 ? -py[1] / length * sign : normalX[i];
+            fitted[3][i] = length > 1e-9 ? px[1] / length * sign : normalY[i];
         }
-        return new TracedCurve(x, y, nx, ny, speedMs, evidence);
+        return new TracedCurve(fitted[0], fitted[1], fitted[2], fitted[3], speedMs, evidence);
+    }
+
+    /** Value and slope at {@code at} of the least-squares parabola through {@code values[from…to]}; a line below four. */
+    private static double[] parabola(double[] values, int from, int to, int at) {
+        int n = to - from + 1;
+        double centre = (from + to) / 2.0;
+        double s2 = 0;
+        double s4 = 0;
+        double y0 = 0;
+        double y1 = 0;
+        double y2 = 0;
+        for (int i = from; i <= to; i++) {
+            double t = i - centre;
+            s2 += t * t;
+            s4 += t * t * t * t;
+            y0 += values[i];
+            y1 += t * values[i];
+            y2 += t * t * values[i];
+        }
+        double slope = s2 > 0 ? y1 / s2 : 0;
+        double determinant = n * s4 - s2 * s2;
+        double bend = n >= 4 ? (n * y2 - s2 * y0) / determinant : 0;
+        double level = (y0 - bend * s2) / n;
+        double t = at - centre;
+        return new double[] {level + slope * t + bend * t * t, slope + 2 * bend * t};
     }
 }

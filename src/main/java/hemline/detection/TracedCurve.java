@@ -56,7 +56,10 @@ record TracedCurve(double[] x, double[] y, double[] normalX, double[] normalY, d
         return new TracedCurve(fitted[0], fitted[1], fitted[2], fitted[3], speedMs, evidence);
     }
 
-    /** Value and slope at {@code at} of the least-squares parabola through {@code values[from…to]}; a line below four. */
+    /**
+     * Value at {@code at} of the least-squares parabola through {@code values[from…to]} (a line below four), and its
+     * slope half way from the middle to there: the slope at an end is too wild.
+     */
     private static double[] parabola(double[] values, int from, int to, int at) {
         int n = to - from + 1;
         double centre = (from + to) / 2.0;
@@ -78,6 +81,6 @@ record TracedCurve(double[] x, double[] y, double[] normalX, double[] normalY, d
         double bend = n >= 4 ? (n * y2 - s2 * y0) / determinant : 0;
         double level = (y0 - bend * s2) / n;
         double t = at - centre;
-        return new double[] {level + slope * t + bend * t * t, slope + 2 * bend * t};
+        return new double[] {level + slope * t + bend * t * t, slope + bend * t};
     }
 }

@@ -51,7 +51,7 @@ class DetectionTest {
                 double across = v.position().xKm() * Math.sin(Math.toRadians(60))
                         + v.position().yKm() * Math.cos(Math.toRadians(60)) + 10 - 12 * v.timeMs() / 1e6;
                 assertThat(Math.abs(across)).isLessThan(0.9);
-                assertThat(hemline.sweep.RayGeometry.gapDeg(v.normal().bearingDeg(), 60)).isLessThan(12);
+                assertThat(hemline.sweep.RayGeometry.gapDeg(v.normal().bearingDeg(), 60)).isLessThan(25);
                 assertThat(v.lineDb()).isGreaterThan(3);
             }
             assertThat(vertices.stream().mapToDouble(ObservedVertex::motionMs).average().orElseThrow())

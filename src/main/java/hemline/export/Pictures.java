@@ -3,8 +3,6 @@ package hemline.export;
 import hemline.boundary.Meeting;
 import hemline.boundary.Track;
 import hemline.boundary.TrackPiece;
-import hemline.boundary.TrackVertex;
-import hemline.geodesy.BeamGeometry;
 import hemline.geometry.Point;
 import hemline.pipeline.Analysis;
 import hemline.sweep.Sweep;
@@ -32,7 +30,7 @@ public final class Pictures {
     public Pictures(Analysis analysis, double ceilingM) {
         this.analysis = analysis;
         this.ceilingM = ceilingM;
-        this.view = new PlaneView(new Point(0, 0), halfKm(), LEFT_PX, TOP_PX, PLANE_PX);
+        this.view = new PlaneView(new Point(0, 0), PlaneExtent.halfKm(analysis, ceilingM), LEFT_PX, TOP_PX, PLANE_PX);
     }
 
     /** One sweep of the loop with its boundaries, their motion, and the meetings up to its end. */
@@ -41,7 +39,7 @@ public final class Pictures {
         Graphics2D graphics = picture.createGraphics();
         Ink ink = new Ink(graphics);
         SweepLayer.paint(picture, view, sweep, 1);
-        PlaneLayer.paint(ink, view, ceilingRangeKm(sweep.beam()));
+        PlaneLayer.paint(ink, view, PlaneExtent.ceilingRangeKm(sweep.beam(), ceilingM));
         graphics.clipRect(view.leftPx(), view.topPx(), view.sizePx(), view.sizePx());
         TrackLayer layer = new TrackLayer(ink, view);
         for (int i = 0; i < analysis.tracks().size(); i++) {
@@ -71,7 +69,7 @@ public final class Pictures {
         Graphics2D graphics = picture.createGraphics();
         Ink ink = new Ink(graphics);
         SweepLayer.paint(picture, view, under, OVERVIEW_OPACITY);
-        PlaneLayer.paint(ink, view, ceilingRangeKm(under.beam()));
+        PlaneLayer.paint(ink, view, PlaneExtent.ceilingRangeKm(under.beam(), ceilingM));
         graphics.clipRect(view.leftPx(), view.topPx(), view.sizePx(), view.sizePx());
         TrackLayer layer = new TrackLayer(ink, view);
         for (int i = 0; i < analysis.tracks().size(); i++) {
@@ -117,39 +115,5 @@ public final class Pictures {
         graphics.fillRect(0, 0, picture.getWidth(), picture.getHeight());
         graphics.dispose();
         return picture;
-    }
-
-    /** Half width that shows everything found with some room, or the reach of the height ceiling. */
-    private double halfKm() {
-        double reach = 0;
-        for (Track track : analysis.tracks()) {
-            for (TrackPiece piece : track.pieces()) {
-                for (TrackVertex vertex : piece.vertices()) {
-                    reach = Math.max(reach, Math.max(Math.abs(vertex.position().xKm()),
-                            Math.abs(vertex.position().yKm())));
-                }
-            }
-        }
-        double ceiling = ceilingRangeKm(analysis.frames().get(0).beam());
-        double wanted = reach > 0 ? Math.max(1.12 * reach, Math.min(ceiling, 40)) : ceiling;
-        return Math.min(300, Math.max(20, wanted));
-    }
-
-    /** Ground range at which the beam rises through the height ceiling, km; infinite when it does not within 500 km. */
-    private double ceilingRangeKm(BeamGeometry beam) {
-        double low = 0;
-        double high = 500_000;
-        if (beam.heightAboveAntennaM(high) < ceilingM) {
-            return Double.POSITIVE_INFINITY;
-        }
-        while (high - low > 10) {
-            double middle = (low + high) / 2;
-            if (beam.heightAboveAntennaM(middle) < ceilingM) {
-                low = middle;
-            } else {
-                high = middle;
-            }
-        }
-        return beam.groundRangeM(high) / 1000;
     }
 }

@@ -9,7 +9,6 @@ import java.util.List;
 
 /** What helps to find one's way on the plane: range rings with their ranges, the compass, the height ceiling. */
 final class PlaneLayer {
-    private static final double[] RING_STEPS_KM = {5, 10, 20, 25, 50, 100};
     private static final Color RING = Ink.faded(Ink.FRAME, 0.75);
 
     private PlaneLayer() {
@@ -18,13 +17,7 @@ final class PlaneLayer {
     static void paint(Ink ink, PlaneView view, double ceilingRangeKm) {
         Shape clip = ink.graphics().getClip();
         ink.graphics().clipRect(view.leftPx(), view.topPx(), view.sizePx(), view.sizePx());
-        double step = RING_STEPS_KM[RING_STEPS_KM.length - 1];
-        for (double candidate : RING_STEPS_KM) {
-            if (view.halfKm() / candidate <= 5) {
-                step = candidate;
-                break;
-            }
-        }
+        double step = PlaneExtent.ringStepKm(view.halfKm());
         double reach = view.halfKm() * Math.sqrt(2) + view.centre().lengthKm();
         for (double km = step; km < reach; km += step) {
             ink.line(circle(view, km), RING, 0.8);

@@ -24,7 +24,7 @@ public final class ResultWriter {
         this.folder = folder;
     }
 
-    /** The tables with what explains them, and the GeoJSON. */
+    /** The tables with what explains them, the GeoJSON and the page for people. */
     public void tables(RunRecord run) throws IOException {
         Geolocation where = new Geolocation(run.analysis().site());
         table(BoundariesTable.TABLE, BoundariesTable.rows(run.analysis().tracks(), where));
@@ -32,6 +32,7 @@ public final class ResultWriter {
         table(MeetingsTable.TABLE, MeetingsTable.rows(run.analysis().meetings(), where));
         folder.stage("datapackage.json", out -> Json.write(DataPackage.describe(), out));
         folder.stage("boundaries.geojson", out -> BoundariesGeoJson.write(out, run.analysis(), where));
+        folder.stage("summary.html", out -> SummaryHtml.write(out, run));
     }
 
     /** One picture as PNG. */

@@ -13,6 +13,7 @@ final class FailureLine implements IExecutionExceptionHandler {
     public int handleExecutionException(Exception failure, CommandLine command, ParseResult parsed) {
         PrintWriter err = command.getErr();
         if (failure instanceof UserProblem problem) {
+            problem.details().forEach(line -> err.println("hemline: " + line));
             err.println("hemline: " + problem.getMessage());
             return ExitCodes.of(problem.kind());
         }

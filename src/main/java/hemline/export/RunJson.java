@@ -42,14 +42,9 @@ final class RunJson {
 
     private static void sweeps(ArrayNode array, List<SweepFrame> frames) {
         for (SweepFrame frame : frames) {
-            long first = Long.MAX_VALUE;
-            long last = Long.MIN_VALUE;
-            for (int i = 0; i < frame.rays().rays(); i++) {
-                first = Math.min(first, frame.rays().timeMs(i));
-                last = Math.max(last, frame.rays().timeMs(i));
-            }
-            ObjectNode node = array.addObject().put("sweep", frame.index()).put("first_utc", Times.iso(first))
-                    .put("last_utc", Times.iso(last)).put("rays", frame.rays().rays());
+            FrameSpan span = FrameSpan.of(frame);
+            ObjectNode node = array.addObject().put("sweep", frame.index())
+                    .put("first_utc", Times.iso(span.firstMs())).put("last_utc", Times.iso(span.lastMs())).put("rays", frame.rays().rays());
             Json.putNumber(node, "elevation_deg", frame.beam().elevationDeg(), 3);
         }
     }
@@ -62,8 +57,8 @@ final class RunJson {
     }
 
     private static void input(ObjectNode node, RunInput input) {
-        node.put("path", input.path()).put("bytes", input.bytes()).put("sha256", input.sha256())
-                .put("format", input.format()).put("fate", input.fate().label()).put("sweeps", input.sweeps());
+        node.put("path", input.path()).put("sha256", input.sha256()).put("fate", input.fate().label())
+                .put("sweeps", input.sweeps());
         if (!input.reason().isEmpty()) {
             node.put("reason", input.reason());
         }

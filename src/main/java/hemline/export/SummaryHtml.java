@@ -42,15 +42,14 @@ final class SummaryHtml {
     private void build(double ceilingM) {
         String radar = Markup.escape(analysis.site().name());
         List<SweepFrame> frames = analysis.frames();
-        long firstMs = frames.get(0).meanTimeMs();
-        long lastMs = frames.get(frames.size() - 1).meanTimeMs();
+        FrameSpan span = FrameSpan.of(frames);
         html.append("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\"/>\n<meta name=\"viewport\" "
                 + "content=\"width=device-width, initial-scale=1\"/>\n<meta http-equiv=\"Content-Security-Policy\" "
                 + "content=\"default-src 'none'; style-src 'unsafe-inline'\"/>\n<title>Outflow boundaries, ")
                 .append(radar).append("</title>\n<style>\n").append(STYLE).append("</style>\n</head>\n<body>\n");
         html.append("<h1>Outflow boundaries, ").append(radar).append("</h1>\n<p>").append(frames.size())
-                .append(frames.size() == 1 ? " sweep, " : " sweeps, ").append(Times.toMinute(firstMs)).append(" to ")
-                .append(Times.toMinute(lastMs)).append("</p>\n");
+                .append(frames.size() == 1 ? " sweep, " : " sweeps, ").append(Times.toMinute(span.firstMs())).append(" to ")
+                .append(Times.toMinute(span.lastMs())).append("</p>\n");
         html.append("<p class=\"caution\">").append(Markup.escape(Cautions.GUIDANCE))
                 .append(" Nothing is claimed where the beam is more than ").append(Numbers.fixed(ceilingM, 0))
                 .append(" m above the radar.");
@@ -58,7 +57,7 @@ final class SummaryHtml {
         html.append("</p>\n<h2>Map</h2>\n").append(IsochroneMap.draw(analysis, ceilingM));
         tracks();
         meetings();
-        traces(firstMs, lastMs);
+        traces(span);
         sources();
         html.append("<h2>Settings</h2>\n<pre>").append(Markup.escape(run.settings().toPrettyString()))
                 .append("</pre>\n<p>hemline ").append(Markup.escape(run.version())).append("</p>\n</body>\n</html>\n");
@@ -95,12 +94,12 @@ final class SummaryHtml {
         html.append("</tbody></table>\n");
     }
 
-    private void traces(long firstMs, long lastMs) {
+    private void traces(FrameSpan span) {
         if (analysis.tracks().isEmpty()) {
             return;
         }
         html.append("<h2>Traces</h2>\n<p>Bands: two standard deviations.</p>\n<div class=\"traces\">\n");
-        TraceChart chart = new TraceChart(firstMs, lastMs);
+        TraceChart chart = new TraceChart(span.firstMs(), span.lastMs());
         for (int i = 0; i < analysis.tracks().size(); i++) {
             Track track = analysis.tracks().get(i);
             for (Series series : List.of(Series.speed(track), Series.radius(track))) {
@@ -113,12 +112,11 @@ final class SummaryHtml {
     }
 
     private void sources() {
-        html.append("<h2>Sources</h2>\n<table><thead><tr><th>file</th><th class=\"words\">format</th>"
+        html.append("<h2>Sources</h2>\n<table><thead><tr><th>file</th>"
                 + "<th class=\"words\">fate</th><th class=\"words\">SHA-256</th></tr></thead><tbody>\n");
         for (RunInput input : run.inputs()) {
             String fate = input.fate().label() + (input.reason().isEmpty() ? "" : ": " + input.reason());
             html.append("<tr><td>").append(Markup.escape(input.path())).append("</td><td class=\"words\">")
-                    .append(Markup.escape(input.format())).append("</td><td class=\"words\">")
                     .append(Markup.escape(fate)).append("</td><td class=\"words\"><code>")
                     .append(Markup.escape(input.sha256())).append("</code></td></tr>\n");
         }

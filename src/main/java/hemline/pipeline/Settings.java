@@ -1,38 +1,50 @@
 package hemline.pipeline;
 
+import hemline.detection.DetectionSettings;
 import hemline.kinematics.KinematicsSettings;
 import hemline.meeting.MeetingSettings;
+import hemline.screening.ScreeningSettings;
 import hemline.tracking.TrackingSettings;
 import java.util.Objects;
 
 /**
  * Everything that decides what a run finds, apart from its input.
  *
- * @param heightCeilingM height of the beam centre above the radar beyond which nothing is claimed, m
- * @param tracking       how boundaries are linked
- * @param kinematics     how motion is measured
- * @param meeting        how meetings are found
+ * @param screening  which gates are set aside, the height ceiling among the reasons
+ * @param detection  how boundaries are found sweep by sweep
+ * @param tracking   how they are linked
+ * @param kinematics how their motion is measured
+ * @param meeting    how meetings are found
  */
-public record Settings(double heightCeilingM, TrackingSettings tracking, KinematicsSettings kinematics,
-                       MeetingSettings meeting) {
-    /** Outflow heads are about 1.3 km deep (Mahoney 1988, Mon. Wea. Rev. 116:1474); above this little is seen. */
-    private static final double DEFAULT_CEILING_M = 1500;
-
+public record Settings(ScreeningSettings screening, DetectionSettings detection, TrackingSettings tracking,
+                       KinematicsSettings kinematics, MeetingSettings meeting) {
     public Settings {
-        if (!(heightCeilingM > 0 && heightCeilingM <= 10_000)) {
-            throw new IllegalArgumentException("the height ceiling must lie within 0..10000 m, got " + heightCeilingM);
-        }
+        Objects.requireNonNull(screening, "screening");
+        Objects.requireNonNull(detection, "detection");
         Objects.requireNonNull(tracking, "tracking");
         Objects.requireNonNull(kinematics, "kinematics");
         Objects.requireNonNull(meeting, "meeting");
     }
 
     public static Settings defaults() {
-        return new Settings(DEFAULT_CEILING_M, TrackingSettings.defaults(), KinematicsSettings.defaults(),
-                MeetingSettings.defaults());
+        return new Settings(ScreeningSettings.defaults(), DetectionSettings.defaults(), TrackingSettings.defaults(),
+                KinematicsSettings.defaults(), MeetingSettings.defaults());
     }
 
-    public Settings withHeightCeilingM(double newCeilingM) {
-        return new Settings(newCeilingM, tracking, kinematics, meeting);
+    /** Height of the beam centre above the radar beyond which nothing is claimed, m. */
+    public double heightCeilingM() {
+        return screening.heightCeilingM();
+    }
+
+    public Settings withHeightCeilingM(double ceilingM) {
+        return new Settings(screening.withHeightCeilingM(ceilingM), detection, tracking, kinematics, meeting);
+    }
+
+    public Settings withDetection(DetectionSettings newDetection) {
+        return new Settings(screening, newDetection, tracking, kinematics, meeting);
+    }
+
+    public Settings withTracking(TrackingSettings newTracking) {
+        return new Settings(screening, detection, newTracking, kinematics, meeting);
     }
 }

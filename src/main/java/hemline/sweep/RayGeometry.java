@@ -48,6 +48,16 @@ public final class RayGeometry {
         return timeMs[ray];
     }
 
+    /** Time of the earliest ray, ms since 1970-01-01T00:00Z. */
+    public long firstMs() {
+        return java.util.Arrays.stream(timeMs).min().orElseThrow();
+    }
+
+    /** Time of the latest ray, ms since 1970-01-01T00:00Z. */
+    public long lastMs() {
+        return java.util.Arrays.stream(timeMs).max().orElseThrow();
+    }
+
     /** The ray whose centre is nearest to an azimuth, degrees clockwise from north; the lower index on a tie. */
     public int nearestRay(double toAzimuthDeg) {
         double wanted = ((toAzimuthDeg % 360) + 360) % 360;

@@ -70,20 +70,12 @@ public record Sweep(RadarSite site, String source, double elevationDeg, double b
 
     /** Time of the earliest ray, ms since 1970-01-01T00:00Z. */
     public long startMs() {
-        long first = Long.MAX_VALUE;
-        for (int i = 0; i < rays.rays(); i++) {
-            first = Math.min(first, rays.timeMs(i));
-        }
-        return first;
+        return rays.firstMs();
     }
 
     /** Time of the latest ray, ms since 1970-01-01T00:00Z. */
     public long endMs() {
-        long last = Long.MIN_VALUE;
-        for (int i = 0; i < rays.rays(); i++) {
-            last = Math.max(last, rays.timeMs(i));
-        }
-        return last;
+        return rays.lastMs();
     }
 
     /** Half way between the earliest and the latest ray, ms since 1970-01-01T00:00Z. */

@@ -4,7 +4,6 @@ import hemline.viewer.render.RasterFeed;
 import hemline.viewer.view.ChooserAsk;
 import hemline.viewer.view.ViewerWindow;
 import hemline.viewer.viewmodel.ViewerModel;
-import hemline.workflow.SessionOpener;
 import hemline.workflow.ViewerRequest;
 import hemline.workflow.ViewerStart;
 import java.time.Clock;
@@ -17,12 +16,6 @@ import javafx.stage.Stage;
 
 /** Starts JavaFX without an {@code Application}, shows one window, and waits until it is closed. */
 public final class FxViewerStart implements ViewerStart {
-    private final SessionOpener opener;
-
-    public FxViewerStart(SessionOpener opener) {
-        this.opener = opener;
-    }
-
     @Override
     public int start(ViewerRequest request) {
         CountDownLatch closed = new CountDownLatch(1);
@@ -52,7 +45,7 @@ public final class FxViewerStart implements ViewerStart {
     }
 
     private void show(ViewerRequest request, ExecutorService work, ExecutorService draw, CountDownLatch closed) {
-        ViewerModel model = new ViewerModel(opener, work, draw, Platform::runLater, Clock.systemUTC());
+        ViewerModel model = new ViewerModel(request.opener(), work, draw, Platform::runLater, Clock.systemUTC());
         Stage stage = new Stage();
         new ViewerWindow(stage, model, new RasterFeed(draw, Platform::runLater), new ChooserAsk());
         stage.setOnHidden(e -> {

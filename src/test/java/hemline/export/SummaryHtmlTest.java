@@ -21,7 +21,7 @@ class SummaryHtmlTest {
     private static String page(String site, String path) throws Exception {
         Analysis analysis = InventedAnalysis.at(new RadarSite(site, Optional.empty(), Double.NaN));
         RunRecord run = new RunRecord("9.9.9", analysis, 1500, JsonNodeFactory.instance.objectNode().put("s", path),
-                List.of(new RunInput(path, "00ff", 12, "ODIM_H5 2.2", RunInput.Fate.USED, 3, "")), List.of());
+                List.of(new RunInput(path, "00ff", RunInput.Fate.READ, 3, "")), List.of());
         ByteArrayOutputStream out = new ByteArrayOutputStream();
         SummaryHtml.write(out, run);
         return out.toString(StandardCharsets.UTF_8);

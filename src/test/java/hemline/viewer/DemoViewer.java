@@ -10,7 +10,8 @@ public final class DemoViewer {
     }
 
     public static void main(String[] args) {
-        new FxViewerStart(new FakeOpener(analysed -> new FakeLoop(14, 720, 600, analysed)))
-                .start(new ViewerRequest(List.of(Path.of("invented"))));
+        new FxViewerStart()
+                .start(new ViewerRequest(List.of(Path.of("invented")),
+                        new FakeOpener(analysed -> new FakeLoop(14, 720, 600, analysed))));
     }
 }

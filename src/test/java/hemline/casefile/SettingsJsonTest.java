@@ -33,7 +33,7 @@ class SettingsJsonTest {
 
     @Test
     void aWholeNumberMayStandForADecimalOne() {
-        assertThat(read("{\"heightCeilingM\": 2000}").heightCeilingM()).isEqualTo(2000);
+        assertThat(read("{\"screening\": {\"heightCeilingM\": 2000}}").heightCeilingM()).isEqualTo(2000);
     }
 
     @Test
@@ -45,21 +45,21 @@ class SettingsJsonTest {
 
     @Test
     void aValueOfTheWrongKindIsNamed() {
-        assertThatThrownBy(() -> read("{\"heightCeilingM\": \"high\"}"))
+        assertThatThrownBy(() -> read("{\"screening\": {\"heightCeilingM\": \"high\"}}"))
                 .isInstanceOf(IllegalArgumentException.class)
-                .hasMessage("setting 'heightCeilingM' must be a number, got \"high\"");
+                .hasMessage("setting 'screening.heightCeilingM' must be a number, got \"high\"");
         assertThatThrownBy(() -> read("{\"tracking\": 3}")).isInstanceOf(IllegalArgumentException.class)
                 .hasMessageContaining("must be an object");
         assertThatThrownBy(() -> read("[]")).isInstanceOf(IllegalArgumentException.class)
                 .hasMessageContaining("must be a JSON object");
-        assertThatThrownBy(() -> read("{\"heightCeilingM\": null}")).isInstanceOf(IllegalArgumentException.class);
+        assertThatThrownBy(() -> read("{\"screening\": {\"heightCeilingM\": null}}")).isInstanceOf(IllegalArgumentException.class);
         assertThatThrownBy(() -> read("{\"tracking\": {\"minSweeps\": 3.5}}"))
                 .isInstanceOf(IllegalArgumentException.class);
     }
 
     @Test
     void aValueOutOfBoundsGivesTheBoundAndTheValue() {
-        assertThatThrownBy(() -> read("{\"heightCeilingM\": -5}")).isInstanceOf(IllegalArgumentException.class)
-                .hasMessage("the height ceiling must lie within 0..10000 m, got -5.0");
+        assertThatThrownBy(() -> read("{\"screening\": {\"heightCeilingM\": -5}}")).isInstanceOf(IllegalArgumentException.class)
+                .hasMessage("the height ceiling must be within 0..20000 m, got -5.0");
     }
 }

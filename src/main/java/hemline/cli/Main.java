@@ -13,8 +13,8 @@ import picocli.CommandLine.Spec;
 
 /** The command line's front door. */
 @Command(name = "hemline", mixinStandardHelpOptions = true, versionProvider = VersionProvider.class,
-        subcommands = {RunCommand.class, ViewCommand.class, InspectCommand.class, ScoreCommand.class,
-            OutflowCommand.class},
+        subcommands = {RunCommand.class, ViewCommand.class, InspectCommand.class, SimulateCommand.class,
+            ScoreCommand.class, OutflowCommand.class},
         description = "Finds, tracks and measures convective outflow boundaries in loops of low radar sweeps.",
         exitCodeListHeading = "%nExit codes:%n",
         exitCodeList = {"0:done", "1:internal failure", "2:wrong usage",

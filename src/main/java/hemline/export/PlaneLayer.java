@@ -22,7 +22,10 @@ final class PlaneLayer {
         for (double km = step; km < reach; km += step) {
             ink.line(circle(view, km), RING, 0.8);
             Point at = Point.towards(45).times(km);
-            ink.rimmedWords(Numbers.fixed(km, 0) + " km", view.x(at) + 3, view.y(at) - 3, 9, Ink.FAINT_WORDS);
+            String words = Numbers.fixed(km, 0) + " km";
+            if (view.x(at) + 3 + StrokeFont.standard().width(words, 9) < view.leftPx() + view.sizePx()) {
+                ink.rimmedWords(words, view.x(at) + 3, view.y(at) - 3, 9, Ink.FAINT_WORDS);
+            }
         }
         for (int bearing = 0; bearing < 360; bearing += 30) {
             Point out = Point.towards(bearing);

@@ -72,6 +72,17 @@ public final class ResultFolder implements AutoCloseable {
         staged.add(name);
     }
 
+    /** The same for a library that writes to a file of its own. */
+    void stageFile(String name, FileBody body) throws IOException {
+        Path file = staging.resolve(name);
+        Files.createDirectories(file.getParent());
+        body.writeTo(file);
+        try (FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE)) {
+            channel.force(true);
+        }
+        staged.add(name);
+    }
+
     /** The file of a staged result. */
     Path stagedFile(String name) {
         return staging.resolve(name);
@@ -135,5 +146,11 @@ public final class ResultFolder implements AutoCloseable {
     @FunctionalInterface
     public interface Body {
         void writeTo(OutputStream out) throws IOException;
+    }
+
+    /** Writes one result to a file that does not exist yet. */
+    @FunctionalInterface
+    interface FileBody {
+        void writeTo(Path file) throws IOException;
     }
 }

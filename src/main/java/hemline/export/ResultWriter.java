@@ -32,6 +32,7 @@ public final class ResultWriter {
         table(MeetingsTable.TABLE, MeetingsTable.rows(run.analysis().meetings(), where));
         folder.stage("datapackage.json", out -> Json.write(DataPackage.describe(), out));
         folder.stage("boundaries.geojson", out -> BoundariesGeoJson.write(out, run.analysis(), where));
+        folder.stageFile("boundaries.nc", file -> BoundariesNetcdf.write(file, run, where));
         folder.stage("summary.html", out -> SummaryHtml.write(out, run));
     }
 

@@ -53,8 +53,8 @@ class DetectionTest {
                 double along = -v.position().xKm() * Math.cos(Math.toRadians(60))
                         + v.position().yKm() * Math.sin(Math.toRadians(60));
                 boolean end = Math.abs(along) > 27;
-                assertThat(Math.abs(across)).isLessThan(end ? 1.5 : 0.6);
-                assertThat(hemline.sweep.RayGeometry.gapDeg(v.normal().bearingDeg(), 60)).isLessThan(end ? 30 : 12);
+                assertThat(Math.abs(across)).isLessThan(end ? 1.5 : 0.8);
+                assertThat(hemline.sweep.RayGeometry.gapDeg(v.normal().bearingDeg(), 60)).isLessThan(end ? 30 : 18);
                 assertThat(v.lineDb()).isGreaterThan(3);
             }
             assertThat(vertices.stream().mapToDouble(ObservedVertex::motionMs).average().orElseThrow())

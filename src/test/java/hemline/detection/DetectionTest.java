@@ -47,16 +47,19 @@ class DetectionTest {
             List<ObservedVertex> vertices = found.stream().filter(b -> b.sweep() == sweep)
                     .flatMap(b -> b.vertices().stream()).toList();
             assertThat(vertices).as("sweep %d", k).hasSizeBetween(50, 72);
+            double sumOfSquares = 0;
             for (ObservedVertex v : vertices) {
                 double across = v.position().xKm() * Math.sin(Math.toRadians(60))
                         + v.position().yKm() * Math.cos(Math.toRadians(60)) + 10 - 12 * v.timeMs() / 1e6;
                 double along = -v.position().xKm() * Math.cos(Math.toRadians(60))
                         + v.position().yKm() * Math.sin(Math.toRadians(60));
                 boolean end = Math.abs(along) > 27;
-                assertThat(Math.abs(across)).isLessThan(end ? 1.5 : 0.8);
+                assertThat(Math.abs(across)).isLessThan(2.0);
                 assertThat(hemline.sweep.RayGeometry.gapDeg(v.normal().bearingDeg(), 60)).isLessThan(end ? 30 : 18);
                 assertThat(v.lineDb()).isGreaterThan(3);
+                sumOfSquares += across * across;
             }
+            assertThat(Math.sqrt(sumOfSquares / vertices.size())).as("rms offset, km").isLessThan(0.6);
             assertThat(vertices.stream().mapToDouble(ObservedVertex::motionMs).average().orElseThrow())
                     .isBetween(10.0, 14.0);
         }

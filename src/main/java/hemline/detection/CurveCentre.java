@@ -10,12 +10,21 @@ import hemline.numerics.Robust;
  */
 final class CurveCentre {
     private static final double[] SCALES_KM = {0.6, 0.9, 1.3};
+    private static final LineProfile[] SCALES = new LineProfile[SCALES_KM.length];
+    /** The scale at which steps are located. */
+    private static final int STEP_SCALE = 1;
     private static final double SEARCH_KM = 1.6;
     /** Offsets beyond this are seldom right: weight of a Gaussian prior, km. */
     private static final double PRIOR_KM = 1.2;
     private static final double LEAST_LINE = 0.8;
     private static final double AGREE_KM = 0.5;
     private static final double ALONG_KM = 2;
+
+    static {
+        for (int k = 0; k < SCALES.length; k++) {
+            SCALES[k] = new LineProfile(SCALES_KM[k] / CurveProfiles.STEP_KM);
+        }
+    }
 
     private CurveCentre() {
     }
@@ -41,39 +50,39 @@ final class CurveCentre {
     private static void locate(double[] profile, int i, double[] offset, double[] weight) {
         double best = 0;
         int at = -1;
-        double sigma = 0;
+        LineProfile scale = null;
         int reach = (int) (SEARCH_KM / CurveProfiles.STEP_KM);
-        for (double scale : SCALES_KM) {
-            double s = scale / CurveProfiles.STEP_KM;
+        for (LineProfile one : SCALES) {
             for (int q = CurveProfiles.MIDDLE - reach; q <= CurveProfiles.MIDDLE + reach; q++) {
-                double off = (q - CurveProfiles.MIDDLE) * CurveProfiles.STEP_KM;
-                double strength = LineProfile.strength(profile, q, s)
-                        * Math.exp(-0.5 * off * off / (PRIOR_KM * PRIOR_KM));
+                double strength = one.strength(profile, q) * prior(q);
                 if (strength > best) {
                     best = strength;
                     at = q;
-                    sigma = s;
+                    scale = one;
                 }
             }
         }
-        if (at >= 0 && best > LEAST_LINE) {
-            double fine = LineProfile.centreOffset(profile, at, sigma);
+        if (scale != null && best > LEAST_LINE) {
+            double fine = scale.centreOffset(profile, at);
             offset[i] = (at - CurveProfiles.MIDDLE + (Double.isNaN(fine) ? 0 : fine)) * CurveProfiles.STEP_KM;
             weight[i] = best;
             return;
         }
         double steepest = 0;
-        double s = SCALES_KM[1] / CurveProfiles.STEP_KM;
         for (int q = CurveProfiles.MIDDLE - reach; q <= CurveProfiles.MIDDLE + reach; q++) {
-            double off = (q - CurveProfiles.MIDDLE) * CurveProfiles.STEP_KM;
-            double slope = s * LineProfile.derivative(profile, q, s, 1)
-                    * Math.exp(-0.5 * off * off / (PRIOR_KM * PRIOR_KM));
+            double slope = SCALES_KM[STEP_SCALE] / CurveProfiles.STEP_KM * SCALES[STEP_SCALE].slope(profile, q)
+                    * prior(q);
             if (slope > steepest) {
                 steepest = slope;
-                offset[i] = off;
+                offset[i] = (q - CurveProfiles.MIDDLE) * CurveProfiles.STEP_KM;
                 weight[i] = 0.5 * slope;
             }
         }
+    }
+
+    private static double prior(int q) {
+        double off = (q - CurveProfiles.MIDDLE) * CurveProfiles.STEP_KM;
+        return Math.exp(-0.5 * off * off / (PRIOR_KM * PRIOR_KM));
     }
 
     /** Weighted mean along the curve of what agrees with the running median. */

@@ -5,16 +5,21 @@ import java.util.List;
 
 /**
  * Evidence of one sweep and its neighbours, each moved along the normal by what a line of some speed would have gone:
- * a line that moves coherently adds up, chance does not (Reed, Gagliardi and Stotts 1988, IEEE Trans. Aerosp. Electron.
- * Syst. 24:327, velocity filters).
+ * a line that moves coherently adds up, chance does not (velocity filters; Reed, Gagliardi and Stotts 1988).
  */
 final class EvidenceStack {
     private static final double STEP_KM = 1.2;
     private static final double LEAST_STEP_MS = 0.8;
     private static final double MOST_STEP_MS = 2.5;
     /** Packed pixel: evidence + OFFSET where something can be said, 0 where not; a sum then tells how many said. */
-    private static final int OFFSET = 512;
-    private static final int HALF = OFFSET / 2;
+    private static final float OFFSET = 1024;
+    /** Adding and taking away this rounds a float to a whole number, in a form that is done many at a time. */
+    private static final float ROUNDER = 12_582_912;
+    /** Steps in a standard deviation to which means are rounded to leave room for the trial's number. */
+    private static final float MEAN_STEPS = 256;
+    /** More than there are trials; the mean's steps times this stay below 2²⁴ and so exact in a float. */
+    private static final float TRIALS = 2048;
+    private static final float NOTHING = -Float.MAX_VALUE;
 
     final PlaneGrid grid;
     /** Best mean evidence of each coarse pixel, standard deviations; −∞ where nothing can be said. */
@@ -47,19 +52,22 @@ final class EvidenceStack {
         for (int j = 0; j < padded.length; j++) {
             padded[j] = new Padded(grid.width(), reach);
         }
-        int[] sums = new int[grid.size()];
+        float[] sums = new float[grid.size()];
+        float[] best = new float[grid.size()];
+        Arrays.fill(best, NOTHING);
         for (int d = 0; d < Orientations.SIGNED; d++) {
             for (int j = 0; j < padded.length; j++) {
                 padded[j].fill(rest.less(layers.get(j).evidence, d), layers.get(j).evidence.grid.width());
             }
             for (int v = 0; v < speeds; v++) {
                 stack(layers, padded, d, v * step, sums);
-                keepBest(sums, layers.size(), d, v * step);
+                keepBest(sums, (layers.size() + 1) / 2, v * Orientations.SIGNED + d, best);
             }
         }
+        decode(best, step);
     }
 
-    private void stack(List<Layer> layers, Padded[] padded, int d, double speed, int[] sums) {
+    private void stack(List<Layer> layers, Padded[] padded, int d, double speed, float[] sums) {
         Arrays.fill(sums, 0);
         for (int j = 0; j < padded.length; j++) {
             double pixels = speed * layers.get(j).afterS / 1000 / grid.spacingKm();
@@ -69,17 +77,28 @@ final class EvidenceStack {
         }
     }
 
-    private void keepBest(int[] sums, int layers, int d, double speed) {
-        int least = (layers + 1) / 2;
+    /** Mean and trial of a pixel go into one float, the mean foremost, so that the larger float is the better trial. */
+    private static void keepBest(float[] sums, int least, int trial, float[] best) {
+        float number = trial;
+        float enough = least;
         for (int i = 0; i < sums.length; i++) {
-            int count = (sums[i] + HALF) / OFFSET;
-            if (count >= least) {
-                float mean = (sums[i] - count * OFFSET) / (SweepEvidence.UNITS * (count + 0.5f));
-                if (mean > evidence[i]) {
-                    evidence[i] = mean;
-                    normal[i] = (byte) d;
-                    speedMs[i] = (float) speed;
-                }
+            float count = (sums[i] * (1 / OFFSET) + ROUNDER) - ROUNDER;
+            float mean = (sums[i] - count * OFFSET) / (SweepEvidence.UNITS * (count + 0.5f));
+            float steps = (mean * MEAN_STEPS + ROUNDER) - ROUNDER;
+            // too few sweeps that say something put the mean far below any other
+            float lacking = Math.max(0, enough - count) * 8192;
+            best[i] = Math.max(best[i], (steps - lacking) * TRIALS + number);
+        }
+    }
+
+    private void decode(float[] best, double step) {
+        for (int i = 0; i < best.length; i++) {
+            double steps = Math.floor(best[i] / TRIALS);
+            if (steps > -4096) {
+                int trial = (int) Math.round(best[i] - steps * TRIALS);
+                evidence[i] = (float) (steps / MEAN_STEPS);
+                normal[i] = (byte) (trial % Orientations.SIGNED);
+                speedMs[i] = (float) (trial / Orientations.SIGNED * step);
             }
         }
     }
@@ -89,13 +108,13 @@ final class EvidenceStack {
         private final int width;
         private final int reach;
         private final int stride;
-        private final int[] pixels;
+        private final float[] pixels;
 
         Padded(int width, int reach) {
             this.width = width;
             this.reach = reach;
             stride = width + 2 * reach;
-            pixels = new int[stride * stride];
+            pixels = new float[stride * stride];
         }
 
         /** Takes a plane about the same radar, of any width. */
@@ -110,7 +129,7 @@ final class EvidenceStack {
             }
         }
 
-        void addShifted(int[] sums, int dx, int dy) {
+        void addShifted(float[] sums, int dx, int dy) {
             for (int y = 0; y < width; y++) {
                 int from = (y + reach + dy) * stride + reach + dx;
                 int to = y * width;

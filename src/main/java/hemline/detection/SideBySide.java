@@ -8,9 +8,9 @@ import java.util.List;
 final class SideBySide {
     private static final double WITHIN_KM = 6;
     private static final double ALONG_KM = 2.5;
-    /** A line this near to one much stronger is its shadow whichever way it seems to move. */
-    private static final double SHADOW_KM = 4;
-    private static final double SHADOW_SHARE = 0.6;
+    /** A line this near to a stronger one is its shadow whichever way it seems to move. */
+    private static final double SHADOW_KM = 3.5;
+    private static final double SHADOW_SHARE = 0.85;
     private static final double COSINE = Math.cos(Math.toRadians(35));
 
     private SideBySide() {

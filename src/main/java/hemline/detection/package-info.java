@@ -10,7 +10,6 @@
  * Open {@link hemline.detection.Detection} first.
  *
  * <p>Follows Knutsson and Westin (1993, Proc. CVPR) for missing data, Lindeberg (1998, IJCV 30:117) and Steger (1998,
- * IEEE PAMI 20:113) for lines, Reed, Gagliardi and Stotts (1988, IEEE Trans. Aerosp. Electron. Syst. 24:327) for
- * stacking along motions, Desolneux, Moisan and Morel (2000, IJCV 40:7) for significance.
+ * IEEE PAMI 20:113) for lines, Reed, Gagliardi and Stotts (1988) for stacking along motions, Desolneux, Moisan and Morel (2000, IJCV 40:7) for significance.
  */
 package hemline.detection;

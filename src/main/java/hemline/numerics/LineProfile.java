@@ -12,63 +12,84 @@ package hemline.numerics;
 public final class LineProfile {
     /** Lindeberg's exponent for ridges. */
     public static final double GAMMA = 0.75;
+    private static final double REACH = 4.5;
 
-    private LineProfile() {
-    }
+    private final double sigma;
+    private final int reach;
+    /** Gaussian and its first two derivatives at −reach…reach, turned about so that they are summed, not convolved. */
+    private final double[] smooth;
+    private final double[] first;
+    private final double[] second;
+    private final double total;
 
-    /**
-     * Derivatives of a sampled profile smoothed by a Gaussian.
-     *
-     * @param profile values; NaN counts as unknown and is left out of the sums
-     * @param at      index of the sample looked at
-     * @param sigma   standard deviation in samples, above 0
-     * @param order   0, 1 or 2
-     * @return the derivative per sample^order; NaN when less than half of the kernel's weight is known
-     */
-    public static double derivative(double[] profile, int at, double sigma, int order) {
+    /** @param sigma standard deviation in samples, above 0 */
+    public LineProfile(double sigma) {
         if (!(sigma > 0)) {
             throw new IllegalArgumentException("the scale must be above 0, got " + sigma);
         }
-        if (order < 0 || order > 2) {
-            throw new IllegalArgumentException("the order must be 0, 1 or 2, got " + order);
-        }
-        int reach = (int) Math.ceil(4.5 * sigma);
-        double known = 0;
-        double mean = 0;
-        double total = 0;
-        for (int k = -reach; k <= reach; k++) {
-            double g = Math.exp(-0.5 * k * k / (sigma * sigma));
-            total += g;
-            int i = at + k;
-            if (i >= 0 && i < profile.length && !Double.isNaN(profile[i])) {
-                known += g;
-                mean += g * profile[i];
-            }
-        }
-        if (known < 0.5 * total) {
-            return Double.NaN;
-        }
-        mean /= known;
-        if (order == 0) {
-            return mean;
-        }
+        this.sigma = sigma;
+        reach = (int) Math.ceil(REACH * sigma);
+        smooth = new double[2 * reach + 1];
+        first = new double[smooth.length];
+        second = new double[smooth.length];
         double sum = 0;
         for (int k = -reach; k <= reach; k++) {
-            int i = at + k;
-            if (i >= 0 && i < profile.length && !Double.isNaN(profile[i])) {
-                double g = Math.exp(-0.5 * k * k / (sigma * sigma)) / (sigma * Math.sqrt(2 * Math.PI));
-                double kernel = order == 1 ? k / (sigma * sigma) * g
-                        : (k * k / (sigma * sigma) - 1) / (sigma * sigma) * g;
-                // about the mean, so that unknown samples pull toward nothing
-                sum += kernel * (profile[i] - mean);
-            }
+            double g = Math.exp(-0.5 * k * k / (sigma * sigma)) / (sigma * Math.sqrt(2 * Math.PI));
+            smooth[k + reach] = g;
+            first[k + reach] = k / (sigma * sigma) * g;
+            second[k + reach] = (k * k / (sigma * sigma) - 1) / (sigma * sigma) * g;
+            sum += g;
         }
-        return sum;
+        total = sum;
     }
 
-    /** Strength of a bright line at a scale, scale-normalised; negative in a valley, NaN when unknown. */
-    public static double strength(double[] profile, int at, double sigma) {
-        return -Math.pow(sigma * sigma, GAMMA) * derivative(profile, at, sigma, 2);
+    /**
+     * Mean of the profile about a sample; NaN when less than half of the kernel's weight is known. Unknown samples (NaN)
+     * are left out.
+     */
+    public double mean(double[] profile, int at) {
+        double sum = 0;
+        double known = 0;
+        int from = Math.max(0, at - reach);
+        int to = Math.min(profile.length - 1, at + reach);
+        for (int i = from; i <= to; i++) {
+            double value = profile[i];
+            if (!Double.isNaN(value)) {
+                sum += smooth[i - at + reach] * value;
+                known += smooth[i - at + reach];
+            }
+        }
+        return known < 0.5 * total ? Double.NaN : sum / known;
+    }
+
+    /** First derivative per sample; NaN when less than half of the kernel's weight is known. */
+    public double slope(double[] profile, int at) {
+        return about(profile, at, first);
+    }
+
+    /** Second derivative per sample squared; NaN when less than half of the kernel's weight is known. */
+    public double bend(double[] profile, int at) {
+        return about(profile, at, second);
+    }
+
+    /** The sum is taken about the mean, so that unknown samples pull toward nothing. */
+    private double about(double[] profile, int at, double[] kernel) {
+        double mean = mean(profile, at);
+        double sum = 0;
+        int from = Math.max(0, at - reach);
+        int to = Math.min(profile.length - 1, at + reach);
+        for (int i = from; i <= to; i++) {
+            double value = profile[i];
+            if (!Double.isNaN(value)) {
+                sum += kernel[i - at + reach] * (value - mean);
+            }
+        }
+        return Double.isNaN(mean) ? Double.NaN : sum;
+    }
+
+    /** Strength of a bright line, scale-normalised; negative in a valley, NaN when unknown. */
+    public double strength(double[] profile, int at) {
+        return -Math.pow(sigma * sigma, GAMMA) * bend(profile, at);
     }
 
     /**
@@ -76,10 +97,9 @@ public final class LineProfile {
      *
      * @return NaN where there is no bright line or the centre is more than half a sample off
      */
-    public static double centreOffset(double[] profile, int at, double sigma) {
-        double slope = derivative(profile, at, sigma, 1);
-        double bend = derivative(profile, at, sigma, 2);
-        double offset = -slope / bend;
+    public double centreOffset(double[] profile, int at) {
+        double bend = bend(profile, at);
+        double offset = -slope(profile, at) / bend;
         return bend < 0 && Math.abs(offset) <= 0.5 + 1e-9 ? offset : Double.NaN;
     }
 }

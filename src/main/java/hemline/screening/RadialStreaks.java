@@ -5,7 +5,9 @@ import java.util.Arrays;
 /**
  * Narrow radial streaks: interference, the sun, other transmitters. A ray's kilometre is streaky when it stands
  * 4 dB over both the sectors 2.5° to its left and right; a stretch is a streak when more than 65 % of 40 km is streaky,
- * a whole ray when more than 40 % of it beyond 20 km is. Wide rain stands over neither side and survives.
+ * a whole ray when more than 40 % of it beyond 20 km is. Wide rain stands over neither side and survives; so does a line
+ * that happens to lie along the beam, for its reflectivity does not rise with range as that of constant power does (Peter,
+ * Seltmann et al. 2013; Huuskonen and Holleman 2007).
  */
 final class RadialStreaks {
     private static final float OVER_DB = 4;
@@ -15,6 +17,8 @@ final class RadialStreaks {
     private static final double RAY_SHARE = 0.4;
     private static final int WINDOW_KM = 40;
     private static final int FROM_KM = 20;
+    private static final int LEAST_POWER_KM = 5;
+    private static final double LEAST_SLOPE_DB = 9;
 
     private final PolarGates polar;
     private final int cells;
@@ -105,7 +109,8 @@ final class RadialStreaks {
         for (int c = FROM_KM; c < cells; c++) {
             beyond += over[c] ? 1 : 0;
         }
-        if (cells - FROM_KM >= WINDOW_KM && beyond > RAY_SHARE * (cells - FROM_KM)) {
+        boolean whole = cells - FROM_KM >= WINDOW_KM && beyond > RAY_SHARE * (cells - FROM_KM);
+        if (whole && constantPower(over, r, 0, cells)) {
             Arrays.fill(found, r * cells, (r + 1) * cells, true);
             return;
         }
@@ -113,12 +118,35 @@ final class RadialStreaks {
         for (int c = 0; c < cells; c++) {
             inWindow += over[c] ? 1 : 0;
             inWindow -= c >= WINDOW_KM && over[c - WINDOW_KM] ? 1 : 0;
-            if (c >= WINDOW_KM - 1 && inWindow > WINDOW_SHARE * WINDOW_KM) {
+            if (c >= WINDOW_KM - 1 && inWindow > WINDOW_SHARE * WINDOW_KM
+                    && constantPower(over, r, c - WINDOW_KM + 1, c + 1)) {
                 for (int k = c - WINDOW_KM + 1; k <= c; k++) {
                     found[r * cells + k] |= over[k];
                 }
             }
         }
+    }
+
+    /** Whether reflectivity rises along the streak as constant power would make it: 20 dB a decade of range. */
+    private boolean constantPower(boolean[] over, int r, int from, int to) {
+        double n = 0;
+        double sx = 0;
+        double sy = 0;
+        double sxx = 0;
+        double sxy = 0;
+        for (int c = Math.max(from, LEAST_POWER_KM); c < to; c++) {
+            if (over[c]) {
+                double x = Math.log10(c + 0.5);
+                double y = km[r * cells + c];
+                n++;
+                sx += x;
+                sy += y;
+                sxx += x * x;
+                sxy += x * y;
+            }
+        }
+        double spread = n * sxx - sx * sx;
+        return n >= 5 && spread > 0 && (n * sxy - sx * sy) / spread > LEAST_SLOPE_DB;
     }
 
     private boolean[] widened(boolean[] found) {

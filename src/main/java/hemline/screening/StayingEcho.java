@@ -14,6 +14,7 @@ final class StayingEcho {
     /** Half width of the surroundings, km. */
     private static final double AROUND_KM = 9;
     private static final double AROUND_SHARE = 0.4;
+    private static final double WIDE_KM = 4;
 
     private final int bins;
     private final boolean[] stays;
@@ -55,7 +56,45 @@ final class StayingEcho {
         for (int i = 0; i < cells; i++) {
             core[i] = low[i] > LEAST_DBZ && low[i] > around[i] + overDb;
         }
+        dropWide(core, bins);
         return new StayingEcho(bins, grown(core, bins));
+    }
+
+    /** Areas that a square of {@link #WIDE_KM} fits into are rain that stands still, not ground. */
+    private static void dropWide(boolean[] core, int bins) {
+        boolean[] inner = new boolean[core.length];
+        int half = (int) Math.round(WIDE_KM * 500 / PolarMap.BIN_M);
+        for (int b = half; b + half < bins; b++) {
+            double rangeKm = (b + 0.5) * PolarMap.BIN_M / 1000;
+            int halfRows = (int) Math.max(1, Math.round(Math.toDegrees(WIDE_KM / 2 / rangeKm)));
+            for (int a = 0; a < PolarMap.AZIMUTHS && halfRows < PolarMap.AZIMUTHS / 8; a++) {
+                inner[a * bins + b] = full(core, bins, a, b, halfRows, half);
+            }
+        }
+        for (int a = 0; a < PolarMap.AZIMUTHS; a++) {
+            for (int b = half; b + half < bins; b++) {
+                if (inner[a * bins + b]) {
+                    double rangeKm = (b + 0.5) * PolarMap.BIN_M / 1000;
+                    int halfRows = (int) Math.max(1, Math.round(Math.toDegrees(WIDE_KM / rangeKm)));
+                    for (int da = -halfRows; da <= halfRows; da++) {
+                        int row = Math.floorMod(a + da, PolarMap.AZIMUTHS) * bins;
+                        Arrays.fill(core, row + Math.max(0, b - 2 * half), row + Math.min(bins, b + 2 * half + 1), false);
+                    }
+                }
+            }
+        }
+    }
+
+    private static boolean full(boolean[] core, int bins, int azimuth, int bin, int halfRows, int halfBins) {
+        for (int da = -halfRows; da <= halfRows; da++) {
+            int row = Math.floorMod(azimuth + da, PolarMap.AZIMUTHS) * bins;
+            for (int b = bin - halfBins; b <= bin + halfBins; b++) {
+                if (!core[row + b]) {
+                    return false;
+                }
+            }
+        }
+        return true;
     }
 
     /** One cell wider all round: the neighbours of clutter are half clutter. */

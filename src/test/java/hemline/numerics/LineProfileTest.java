@@ -26,7 +26,7 @@ class LineProfileTest {
         double best = 0;
         double bestT = 0;
         for (double t = 3.5; t <= 4.5; t += 0.0025) {
-            double strength = LineProfile.strength(line, MIDDLE, Math.sqrt(t) * FINE);
+            double strength = new LineProfile(Math.sqrt(t) * FINE).strength(line, MIDDLE);
             if (strength > best) {
                 best = strength;
                 bestT = t;
@@ -43,7 +43,7 @@ class LineProfileTest {
         double best = 0;
         double bestSigma = 0;
         for (double sigma = 1.05; sigma <= 1.25; sigma += 0.0005) {
-            double bend = -LineProfile.derivative(bar, MIDDLE, sigma * FINE, 2) * FINE * FINE;
+            double bend = -new LineProfile(sigma * FINE).bend(bar, MIDDLE) * FINE * FINE;
             if (bend > best) {
                 best = bend;
                 bestSigma = sigma;
@@ -61,7 +61,7 @@ class LineProfileTest {
         double[] impulse = new double[121];
         impulse[60] = 1;
         for (int at = 40; at <= 80; at++) {
-            double second = LineProfile.derivative(impulse, at, sigma, 2)
+            double second = new LineProfile(sigma).bend(impulse, at)
                     + meanPart(impulse, at, sigma);
             sum += second * second;
         }
@@ -72,9 +72,7 @@ class LineProfileTest {
 
     /** The derivative is taken about the kernel's mean; on a lone impulse that adds a multiple of the kernel's sum. */
     private static double meanPart(double[] profile, int at, double sigma) {
-        double mean = LineProfile.derivative(profile, at, sigma, 0);
-        double[] ones = new double[profile.length];
-        java.util.Arrays.fill(ones, mean);
+        double mean = new LineProfile(sigma).mean(profile, at);
         double kernel = 0;
         int reach = (int) Math.ceil(4.5 * sigma);
         for (int k = -reach; k <= reach; k++) {
@@ -93,7 +91,7 @@ class LineProfileTest {
             for (int i = 0; i < profile.length; i++) {
                 profile[i] = 3 + 8 * Math.exp(-(i - 30 - centre) * (i - 30 - centre) / 8);
             }
-            assertThat(LineProfile.centreOffset(profile, 30, 2)).isCloseTo(centre, within(0.03));
+            assertThat(new LineProfile(2).centreOffset(profile, 30)).isCloseTo(centre, within(0.03));
         }
     }
 
@@ -103,8 +101,8 @@ class LineProfileTest {
         for (int i = 0; i < valley.length; i++) {
             valley[i] = (i - 30) * (i - 30);
         }
-        assertThat(LineProfile.centreOffset(valley, 30, 2)).isNaN();
-        assertThat(LineProfile.centreOffset(new double[61], 30, 2)).isNaN();
+        assertThat(new LineProfile(2).centreOffset(valley, 30)).isNaN();
+        assertThat(new LineProfile(2).centreOffset(new double[61], 30)).isNaN();
     }
 
     @Test
@@ -112,9 +110,9 @@ class LineProfileTest {
         double[] profile = new double[61];
         java.util.Arrays.fill(profile, 5);
         java.util.Arrays.fill(profile, 33, 36, Double.NaN);
-        assertThat(LineProfile.derivative(profile, 30, 2, 0)).isCloseTo(5, within(1e-12));
-        assertThat(LineProfile.derivative(profile, 30, 2, 1)).isCloseTo(0, within(1e-12));
+        assertThat(new LineProfile(2).mean(profile, 30)).isCloseTo(5, within(1e-12));
+        assertThat(new LineProfile(2).slope(profile, 30)).isCloseTo(0, within(1e-12));
         java.util.Arrays.fill(profile, Double.NaN);
-        assertThat(LineProfile.derivative(profile, 30, 2, 0)).isNaN();
+        assertThat(new LineProfile(2).mean(profile, 30)).isNaN();
     }
 }

@@ -81,8 +81,12 @@ final class ElementGrid {
                 for (int i = start[at]; i < start[at + 1]; i++) {
                     int e = member[i];
                     double cos = Math.abs(tangentX * elements.tangentX(e) + tangentY * elements.tangentY(e));
+                    // Not a number where either has no direction: then any angle will do.
+                    if (cos < leastCos) {
+                        continue;
+                    }
                     double distance = elements.distanceKm(e, x, y);
-                    if (distance <= reachKm && !(cos < leastCos)) {
+                    if (distance <= reachKm) {
                         into.offer(elements.owner(e), e, distance, elements.plain(e));
                     }
                 }

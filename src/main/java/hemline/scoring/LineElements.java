@@ -161,7 +161,9 @@ final class LineElements {
     /** Distance from a place to the element, km. */
     double distanceKm(int e, double x, double y) {
         double part = footShare(e, x, y);
-        return Math.hypot(x - ax[e] - part * (bx[e] - ax[e]), y - ay[e] - part * (by[e] - ay[e]));
+        double dx = x - ax[e] - part * (bx[e] - ax[e]);
+        double dy = y - ay[e] - part * (by[e] - ay[e]);
+        return Math.sqrt(dx * dx + dy * dy);
     }
 
     /** Whether a place lies beside the element rather than past an end of its line. */

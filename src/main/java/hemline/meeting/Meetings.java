@@ -23,9 +23,12 @@ public final class Meetings {
         List<Meeting> found = new ArrayList<>();
         if (!frames.isEmpty()) {
             ObservedMeetings observed = new ObservedMeetings(frames, settings);
+            ExpectedMeetings expected = new ExpectedMeetings(frames, settings);
             for (int a = 0; a < tracks.size(); a++) {
                 for (int b = a + 1; b < tracks.size(); b++) {
-                    observed.of(tracks.get(a), tracks.get(b)).ifPresent(found::add);
+                    Track first = tracks.get(a);
+                    Track second = tracks.get(b);
+                    observed.of(first, second).or(() -> expected.of(first, second)).ifPresent(found::add);
                 }
             }
         }

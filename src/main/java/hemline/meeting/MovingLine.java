@@ -4,6 +4,7 @@ import hemline.boundary.TrackPiece;
 import hemline.boundary.TrackVertex;
 import hemline.geometry.Point;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -28,9 +29,48 @@ record MovingLine(double[] x, double[] y, double[] timeS, double[] velocityX, do
         return x.length;
     }
 
-    /** Length of a segment at a vertex that counts as held together, km. */
-    Point point(int i) {
-        return new Point(x[i], y[i]);
+    /** Where a vertex is at a time, s from the loop's start, if it goes on as it does. */
+    Point at(int i, double atS) {
+        double moved = (atS - timeS[i]) / 1000;
+        return new Point(x[i] + velocityX[i] * moved, y[i] + velocityY[i] * moved);
+    }
+
+    double speedMs(int i) {
+        return Math.hypot(velocityX[i], velocityY[i]);
+    }
+
+    /** The runs of at least three vertices that, carried on to the time of other lines, lie apart from them. */
+    List<MovingLine> apartFrom(List<MovingLine> others, double withinKm) {
+        List<MovingLine> runs = new ArrayList<>();
+        int start = 0;
+        for (int i = 0; i <= size(); i++) {
+            if (i == size() || near(i, others, withinKm)) {
+                if (i - start >= 3) {
+                    runs.add(part(start, i));
+                }
+                start = i + 1;
+            }
+        }
+        return runs;
+    }
+
+    private boolean near(int i, List<MovingLine> others, double withinKm) {
+        for (MovingLine other : others) {
+            Point moved = at(i, other.timeS[0]);
+            for (int j = 0; j < other.size(); j++) {
+                if (Math.hypot(moved.xKm() - other.x[j], moved.yKm() - other.y[j]) < withinKm) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    private MovingLine part(int from, int to) {
+        return new MovingLine(Arrays.copyOfRange(x, from, to), Arrays.copyOfRange(y, from, to),
+                Arrays.copyOfRange(timeS, from, to), Arrays.copyOfRange(velocityX, from, to),
+                Arrays.copyOfRange(velocityY, from, to), Arrays.copyOfRange(sdMs, from, to),
+                Arrays.copyOfRange(carriedKm, from, to));
     }
 
     /**

@@ -6,7 +6,6 @@ import hemline.boundary.Track;
 import hemline.boundary.TrackPiece;
 import hemline.geometry.Point;
 import hemline.sweep.SweepFrame;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.SortedMap;
@@ -38,8 +37,9 @@ final class ObservedMeetings {
             if (!atA.containsKey(k) || !atB.containsKey(k)) {
                 continue;
             }
-            Approach now = Approach.nearest(lines(atA.get(k), a), lines(atB.get(k), b), timeS(k),
-                    settings.minCrossDeg());
+            Approach now = Approach.nearest(
+                    CurrentLines.of(a, atA.get(k), originMs, settings.extendKm()),
+                    CurrentLines.of(b, atB.get(k), originMs, settings.extendKm()), timeS(k), settings.minCrossDeg());
             if (now == null) {
                 continue;
             }
@@ -70,20 +70,6 @@ final class ObservedMeetings {
         double waitS = 1000 * apart.gapKm() / Math.max(LEAST_CLOSING_MS, apart.closingMs());
         double timeS = Math.min(apartS + waitS, togetherS);
         return meeting(a, b, apart, timeS, timeS - apartS);
-    }
-
-    private List<MovingLine> lines(List<TrackPiece> pieces, Track track) {
-        List<MovingLine> lines = new ArrayList<>();
-        double fallback = track.speed().isKnown() ? track.speed().speedMs() : 5;
-        for (TrackPiece piece : pieces) {
-            lines.add(MovingLine.of(piece, originMs, settings.extendKm(), fallback, radius(track, piece.sweep())));
-        }
-        return lines;
-    }
-
-    private static double radius(Track track, int sweep) {
-        return track.arc().stream().flatMap(arc -> arc.radii().stream()).filter(r -> r.sweep() == sweep)
-                .mapToDouble(hemline.boundary.ArcHistory.RadiusAt::radiusKm).findFirst().orElse(Double.NaN);
     }
 
     private Meeting meeting(Track a, Track b, Approach near, double timeS, double waitS) {

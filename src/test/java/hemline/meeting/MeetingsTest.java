@@ -43,4 +43,21 @@ class MeetingsTest {
                 InventedFront.straight(new Point(-20, 0), 270, 10, 60),
                 InventedFront.straight(new Point(20, 0), 90, 10, 60)))).isEmpty();
     }
+
+    @Test
+    void ringsThatWillMeetAfterTheLoopAreExpectedTo() {
+        // Gap 70 km at the start, closing at 20 m/s: contact after 3500 s; the loop ends at 2240 s.
+        InventedLoop loop = new InventedLoop(3,
+                InventedFront.ring(new Point(-50, 10), new Point(0, 0), 15, 10, 0, 180),
+                InventedFront.ring(new Point(50, 10), new Point(0, 0), 15, 10, 180, 360)).every(280, 9);
+        List<Meeting> meetings = meetings(loop);
+        assertThat(meetings).hasSize(1);
+        Meeting meeting = meetings.get(0);
+        assertThat(meeting.status()).isEqualTo(Meeting.Status.EXPECTED);
+        double errorS = InventedLoop.secondsAt(meeting.timeMs()) - 3500;
+        assertThat(Math.abs(errorS)).isLessThan(Math.min(300, 3 * meeting.timeSdS()));
+        assertThat(meeting.place().distanceKm(new Point(0, 10))).isLessThan(10);
+        assertThat(meeting.probability()).isGreaterThan(0.8);
+        assertThat(meetings(loop)).isEqualTo(meetings);
+    }
 }

@@ -21,7 +21,8 @@ public final class InventedLoop {
     private static final double SWEEP_S = 24;
 
     private final List<InventedFront> fronts;
-    private final Random random;
+    private final long seed;
+    private Random random;
     private double[] sweepTimesS;
     private double noiseKm = 0.35;
     private double gapShare = 0.1;
@@ -32,7 +33,7 @@ public final class InventedLoop {
 
     public InventedLoop(long seed, InventedFront... fronts) {
         this.fronts = List.of(fronts);
-        random = new Random(seed);
+        this.seed = seed;
         every(300, 12);
     }
 
@@ -102,7 +103,9 @@ public final class InventedLoop {
         return (timeMs - START_MS) / 1000.0;
     }
 
+    /** The same boundaries at every call. */
     public List<ObservedBoundary> found() {
+        random = new Random(seed);
         List<ObservedBoundary> found = new ArrayList<>();
         List<SweepFrame> frames = frames();
         for (SweepFrame frame : frames) {

@@ -67,7 +67,7 @@ final class CfSweep {
             }
         }
         if (n < rows.length) {
-            notes.add((rows.length - n) + " rays in transition or without direction left out");
+            notes.add("rays in transition or without direction are left out");
         }
         return Arrays.copyOf(rows, n);
     }

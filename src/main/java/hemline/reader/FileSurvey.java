@@ -107,6 +107,7 @@ record FileSurvey(Path path, String sha256, Optional<String> refusal, boolean sk
     private static List<String> notes(SweepHead head, Sweep sweep, ReadOptions options) {
         List<String> notes = new ArrayList<>();
         head.notes().forEach(note -> notes.add(head.place() + ": " + note));
+        RayOrder.of(head.rays(), head.elevationDeg()).notes().forEach(note -> notes.add(head.place() + ": " + note));
         List<FieldHead> all = FieldChooser.reflectivities(head.fields());
         if (options.field().isEmpty() && all.size() > 1) {
             notes.add("reflectivity " + sweep.reflectivity().name() + " chosen among "

@@ -102,7 +102,7 @@ public final class LoopOpener {
                 usable.add(survey);
             }
             if (skipped > 0) {
-                notes.add(skipped + " files in the folders are text or pictures and are skipped");
+                notes.add("text and pictures in the folders are skipped (" + files(skipped) + ")");
             }
             return usable;
         }
@@ -121,8 +121,8 @@ public final class LoopOpener {
                         ? "not of " + options.site().orElse("") : "the loop is of " + chosen.get().first().name())
                         + "; choose a radar with --site";
                 group.files().forEach(file -> settle(file, InputFate.Fate.REFUSED, why, 0));
-                notes.add(group.files().size() + " files of radar " + group.first().name() + " are refused: one loop "
-                        + "is of one radar");
+                notes.add("a loop is of one radar; refused: " + group.first().name() + " ("
+                        + files(group.files().size()) + ")");
             }
             return chosen;
         }
@@ -170,7 +170,11 @@ public final class LoopOpener {
             Map<String, Integer> said = new LinkedHashMap<>();
             group.files().forEach(f -> new HashSet<>(f.notes()).stream().sorted()
                     .forEach(note -> said.merge(note, 1, Integer::sum)));
-            said.forEach((note, times) -> notes.add(note + " (" + times + (times == 1 ? " file)" : " files)")));
+            said.forEach((note, times) -> notes.add(note + " (" + files(times) + ")"));
+        }
+
+        private static String files(int count) {
+            return count == 1 ? "1 file" : count + " files";
         }
 
         private void settle(FileSurvey survey, InputFate.Fate fate, String reason, int sweeps) {

@@ -33,11 +33,11 @@ record RayOrder(int[] stored, RayGeometry geometry, List<String> notes) {
         Arrays.sort(order, Comparator.<Integer>comparingDouble(i -> azimuth[i]).thenComparingInt(i -> i));
 
         List<Ray> sorted = new ArrayList<>();
-        int twice = 0;
+        boolean twice = false;
         for (int i : order) {
             Ray last = sorted.isEmpty() ? null : sorted.get(sorted.size() - 1);
             if (last != null && azimuth[i] - last.azimuthDeg < SAME_SPACINGS * spacing) {
-                twice++;
+                twice = true;
                 if (i < last.stored) {
                     sorted.set(sorted.size() - 1, ray(rays, i, azimuth[i], nominalElevationDeg));
                 }
@@ -45,8 +45,8 @@ record RayOrder(int[] stored, RayGeometry geometry, List<String> notes) {
             }
             sorted.add(ray(rays, i, azimuth[i], nominalElevationDeg));
         }
-        if (twice > 0) {
-            notes.add(twice + " rays at the azimuth of another left out");
+        if (twice) {
+            notes.add("rays at the azimuth of another are left out");
         }
         List<Ray> filled = withGapsFilled(sorted, spacing, nominalElevationDeg, notes);
         return new RayOrder(filled.stream().mapToInt(r -> r.stored).toArray(), new RayGeometry(
@@ -87,7 +87,7 @@ record RayOrder(int[] stored, RayGeometry geometry, List<String> notes) {
             double step = ((azimuth[n] - azimuth[n - 1]) % 360 + 540) % 360 - 180;
             travelled += step;
             if (Math.abs(travelled) > 360 - spacing / 2) {
-                notes.add(azimuth.length - n + " rays beyond a full turn left out");
+                notes.add("rays beyond a full turn are left out");
                 break;
             }
         }
@@ -98,7 +98,7 @@ record RayOrder(int[] stored, RayGeometry geometry, List<String> notes) {
 
     private static List<Ray> withGapsFilled(List<Ray> sorted, double spacing, double nominalDeg, List<String> notes) {
         List<Ray> filled = new ArrayList<>();
-        int missing = 0;
+        boolean missing = false;
         int n = sorted.size();
         for (int i = 0; i < n; i++) {
             Ray here = sorted.get(i);
@@ -112,11 +112,11 @@ record RayOrder(int[] stored, RayGeometry geometry, List<String> notes) {
                     filled.add(new Ray(-1, turned(here.azimuthDeg + part * gap), nominalDeg,
                             here.timeMs + Math.round(part * (next.timeMs - here.timeMs))));
                 }
-                missing += between;
+                missing = true;
             }
         }
-        if (missing > 0) {
-            notes.add(missing + " rays missing in the turn, kept as not measured");
+        if (missing) {
+            notes.add("directions without a ray are kept as not measured");
             filled.sort(Comparator.comparingDouble(Ray::azimuthDeg));
         }
         return filled;

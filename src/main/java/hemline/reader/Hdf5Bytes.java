@@ -3,11 +3,13 @@ package hemline.reader;
 import io.jhdf.api.Dataset;
 import io.jhdf.api.dataset.ChunkedDataset;
 import io.jhdf.api.dataset.ContiguousDataset;
+import io.jhdf.dataset.CompactDataset;
 import io.jhdf.exceptions.HdfException;
+import io.jhdf.exceptions.HdfFilterException;
 import io.jhdf.filter.PipelineFilterWithData;
-import io.jhdf.object.message.DataLayout;
 import java.nio.ByteBuffer;
 import java.nio.ByteOrder;
+import java.util.Arrays;
 import java.util.List;
 import java.util.zip.DataFormatException;
 import java.util.zip.Inflater;
@@ -25,10 +27,11 @@ final class Hdf5Bytes {
     private Hdf5Bytes() {
     }
 
-    static ByteBuffer rows(InputFile file, String path, Dataset dataset, int[] shape, int elementBytes, int from,
-                           int count) throws UnreadableFileException {
+    /** @param order byte order of the stored numbers, for fill values */
+    static ByteBuffer rows(InputFile file, String path, Dataset dataset, int[] shape, int elementBytes,
+                           ByteOrder order, int from, int count) throws UnreadableFileException {
         if (dataset instanceof ChunkedDataset chunked && shape.length > 0) {
-            return new Chunks(file, path, chunked, shape, elementBytes).rows(from, count);
+            return new Chunks(file, path, chunked, shape, elementBytes, order).rows(from, count);
         }
         int rowBytes = elementBytes;
         for (int i = 1; i < shape.length; i++) {
@@ -40,11 +43,11 @@ final class Hdf5Bytes {
             return plain.getBuffer().duplicate().position(offset).limit(offset + length).slice();
         }
         byte[] filled = new byte[length];
-        if (dataset.getDataLayout() == DataLayout.COMPACT) {
-            return ((io.jhdf.dataset.CompactDataset) dataset).getDataBuffer().duplicate()
+        if (dataset instanceof CompactDataset compact) {
+            return compact.getDataBuffer().duplicate()
                     .position(offset).limit(offset + length).slice();
         }
-        fill(filled, dataset.getFillValue(), elementBytes, ByteOrder.LITTLE_ENDIAN);
+        fill(filled, dataset.getFillValue(), elementBytes, order);
         return ByteBuffer.wrap(filled);
     }
 
@@ -76,17 +79,19 @@ final class Hdf5Bytes {
         private final int[] shape;
         private final int[] chunk;
         private final int elementBytes;
+        private final ByteOrder order;
         private final int chunkBytes;
         private final List<PipelineFilterWithData> filters;
         private byte[] unfilled;
 
-        Chunks(InputFile file, String path, ChunkedDataset dataset, int[] shape, int elementBytes)
-                throws UnreadableFileException {
+        Chunks(InputFile file, String path, ChunkedDataset dataset, int[] shape, int elementBytes,
+               ByteOrder order) throws UnreadableFileException {
             this.file = file;
             this.path = path;
             this.dataset = dataset;
             this.shape = shape;
             this.elementBytes = elementBytes;
+            this.order = order;
             chunk = dataset.getChunkDimensions();
             if (chunk.length != shape.length) {
                 throw file.broken(path, "chunks have " + chunk.length + " dimensions, the array " + shape.length);
@@ -97,13 +102,26 @@ final class Hdf5Bytes {
                 }
             }
             chunkBytes = Math.multiplyExact(Limits.elements(file, path, chunk), elementBytes);
-            filters = dataset.getFilters();
+            filters = filters(file, path, dataset);
             for (PipelineFilterWithData filter : filters) {
                 if (filter.getId() != DEFLATE && filter.getId() != SHUFFLE && filter.getId() != FLETCHER32) {
-                    throw file.fault(path, "is packed with HDF5 filter " + filter.getId() + " (" + filter.getName()
-                            + "), which is not supported", "repack it with deflate, for example h5repack -f GZIP=4");
+                    throw unsupported(file, path, filter.getName() + " id=" + filter.getId());
                 }
             }
+        }
+
+        private static List<PipelineFilterWithData> filters(InputFile file, String path, ChunkedDataset dataset)
+                throws UnreadableFileException {
+            try {
+                return dataset.getFilters();
+            } catch (HdfFilterException e) {
+                throw unsupported(file, path, String.valueOf(e.getMessage()));
+            }
+        }
+
+        private static UnreadableFileException unsupported(InputFile file, String path, String filter) {
+            return file.fault(path, "is packed with an HDF5 filter that is not supported (" + filter + ")",
+                    "repack it with deflate, for example: h5repack -f GZIP=4 IN OUT");
         }
 
         ByteBuffer rows(int from, int count) throws UnreadableFileException {
@@ -166,15 +184,9 @@ final class Hdf5Bytes {
         private byte[] unfilled() {
             if (unfilled == null) {
                 unfilled = new byte[chunkBytes];
-                ByteOrder order = ((io.jhdf.object.datatype.OrderedDataType) plainType()).getByteOrder();
                 fill(unfilled, dataset.getFillValue(), elementBytes, order);
             }
             return unfilled;
-        }
-
-        private Object plainType() {
-            return dataset.getDataType() instanceof io.jhdf.object.datatype.EnumDataType named ? named.getBaseType()
-                    : dataset.getDataType();
         }
 
         private byte[] unpacked(int[] offset) throws UnreadableFileException {
@@ -182,7 +194,9 @@ final class Hdf5Bytes {
             try {
                 raw = dataset.getRawChunkBuffer(offset.clone());
             } catch (HdfException e) {
-                if (String.valueOf(e.getMessage()).startsWith("No chunk with offset")) {
+                String message = String.valueOf(e.getMessage());
+                // A chunk that was never written is missing from the index, or in it without an address.
+                if (message.startsWith("No chunk with offset") || message.endsWith("at address -1")) {
                     return unfilled();
                 }
                 throw e;
@@ -192,7 +206,7 @@ final class Hdf5Bytes {
             for (int i = filters.size() - 1; i >= 0; i--) {
                 int id = filters.get(i).getId();
                 if (id == FLETCHER32) {
-                    bytes = bytes.length >= 4 ? java.util.Arrays.copyOf(bytes, bytes.length - 4) : bytes;
+                    bytes = bytes.length >= 4 ? Arrays.copyOf(bytes, bytes.length - 4) : bytes;
                 } else if (id == DEFLATE) {
                     bytes = inflated(bytes);
                 } else if (elementBytes > 1) {

@@ -9,6 +9,7 @@ import io.jhdf.object.datatype.DataType;
 import io.jhdf.object.datatype.StringData;
 import io.jhdf.object.datatype.VariableLength;
 import java.nio.ByteBuffer;
+import java.nio.ByteOrder;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -19,6 +20,8 @@ import java.util.Optional;
  * and no handle stays open. Links out of the file are not followed.
  */
 final class Hdf5File implements ArrayFile {
+    private static final long SIGNATURE = 0x0a1a0a0d46444889L;
+
     private final InputFile file;
     private final HdfFile hdf;
 
@@ -28,7 +31,28 @@ final class Hdf5File implements ArrayFile {
     }
 
     static Hdf5File open(InputFile file, ByteBuffer bytes) throws UnreadableFileException {
-        return new Hdf5File(file, file.shield("", () -> HdfFile.fromByteBuffer(bytes)));
+        return new Hdf5File(file, file.shield("", () -> {
+            requireWhole(file, bytes.duplicate().order(ByteOrder.LITTLE_ENDIAN));
+            return HdfFile.fromByteBuffer(bytes);
+        }));
+    }
+
+    /** The superblock (HDF5 File Format Specification 3.0, section II.A) says where the file ends. */
+    private static void requireWhole(InputFile file, ByteBuffer in) throws UnreadableFileException {
+        int at = 0;
+        while (in.getLong(at) != SIGNATURE) {
+            at = at == 0 ? 512 : 2 * at;
+        }
+        int version = in.get(at + 8);
+        int offsetBytes = in.get(at + (version < 2 ? 13 : 9));
+        if (version < 0 || version > 3 || offsetBytes != 4 && offsetBytes != 8) {
+            throw file.broken("superblock", "has version " + version + " and addresses of " + offsetBytes + " bytes");
+        }
+        int endAt = at + (version == 0 ? 24 : version == 1 ? 28 : 12) + 2 * offsetBytes;
+        long end = offsetBytes == 8 ? in.getLong(endAt) : in.getInt(endAt) & 0xffffffffL;
+        if (end > in.capacity()) {
+            throw file.broken("", "is cut off: it has " + in.capacity() + " bytes, its header says " + end);
+        }
     }
 
     @Override

@@ -5,6 +5,7 @@ import io.jhdf.object.datatype.DataType;
 import io.jhdf.object.datatype.EnumDataType;
 import io.jhdf.object.datatype.FixedPoint;
 import io.jhdf.object.datatype.FloatingPoint;
+import io.jhdf.object.datatype.OrderedDataType;
 import io.jhdf.object.datatype.StringData;
 import io.jhdf.object.datatype.VariableLength;
 import java.nio.ByteBuffer;
@@ -84,7 +85,8 @@ final class Hdf5Variable implements ArrayVariable {
         if ((long) elements * size > Limits.MAX_CELLS * 8) {
             throw file.broken(path, "the array claims " + (long) elements * size + " bytes");
         }
-        return file.shield(path, () -> typed(Hdf5Bytes.rows(file, path, dataset, shape, size, from, count), elements));
+        return file.shield(path, () -> typed(Hdf5Bytes.rows(file, path, dataset, shape, size, order(), from,
+                count), elements));
     }
 
     private int elementBytes() throws UnreadableFileException {
@@ -98,10 +100,12 @@ final class Hdf5Variable implements ArrayVariable {
         return size;
     }
 
+    private ByteOrder order() {
+        return type instanceof OrderedDataType ordered ? ordered.getByteOrder() : ByteOrder.LITTLE_ENDIAN;
+    }
+
     private RawArray typed(ByteBuffer bytes, int elements) {
-        boolean little = type instanceof FixedPoint whole ? whole.getByteOrder() == ByteOrder.LITTLE_ENDIAN
-                : ((FloatingPoint) type).getByteOrder() == ByteOrder.LITTLE_ENDIAN;
-        bytes.order(little ? ByteOrder.LITTLE_ENDIAN : ByteOrder.BIG_ENDIAN);
+        bytes.order(order());
         if (type instanceof FloatingPoint) {
             if (type.getSize() == 4) {
                 float[] values = new float[elements];
@@ -144,7 +148,8 @@ final class Hdf5Variable implements ArrayVariable {
         // netCDF stores a character array as strings of one byte.
         int textBytes = fixed && size == 1 && shape.length > 0 ? Math.max(1, shape[shape.length - 1]) : size;
         return file.shield(path, () -> {
-            ByteBuffer all = Hdf5Bytes.rows(file, path, dataset, shape, size, 0, shape.length == 0 ? 1 : shape[0]);
+            ByteBuffer all = Hdf5Bytes.rows(file, path, dataset, shape, size, ByteOrder.LITTLE_ENDIAN, 0,
+                    shape.length == 0 ? 1 : shape[0]);
             List<String> texts = new ArrayList<>();
             while (all.remaining() >= textBytes && textBytes > 0) {
                 ByteBuffer one = all.slice().limit(textBytes);

@@ -35,15 +35,19 @@ public final class CaseExamples {
     }
 
     public static List<SweepFrame> frames(int count) {
+        return frames(count, 72);
+    }
+
+    private static List<SweepFrame> frames(int count, int rays) {
         List<SweepFrame> frames = new ArrayList<>();
         for (int index = 0; index < count; index++) {
-            double[] azimuth = new double[72];
-            double[] elevation = new double[72];
-            long[] time = new long[72];
-            for (int ray = 0; ray < 72; ray++) {
-                azimuth[ray] = 5 * ray + 0.1;
+            double[] azimuth = new double[rays];
+            double[] elevation = new double[rays];
+            long[] time = new long[rays];
+            for (int ray = 0; ray < rays; ray++) {
+                azimuth[ray] = 360.0 / rays * ray + 0.1;
                 elevation[ray] = 0.5;
-                time[ray] = START_MS + index * STEP_MS + ray * 250L;
+                time[ray] = START_MS + index * STEP_MS + ray * 18_000L / rays;
             }
             frames.add(new SweepFrame(index, new RayGeometry(azimuth, elevation, time), new BeamGeometry(0.5, 312)));
         }
@@ -68,6 +72,14 @@ public final class CaseExamples {
                 Meeting.Status.OBSERVED, 1);
         return new Found(new RadarSite("invented", Optional.of(new GeoPoint(39.5, -98.25)), 312), frames, tracks,
                 List.of(meeting), List.of("The scene is invented."));
+    }
+
+    /** As little as a case can hold, where only its files matter. */
+    public static Found tiny(double eastKm) {
+        List<SweepFrame> frames = frames(1, 4);
+        Track track = track("T1", frames, BoundaryKind.THIN_LINE, sweep -> s -> new Point(10 + eastKm, 2 * s), 2);
+        return new Found(new RadarSite("invented", Optional.empty(), Double.NaN), frames, List.of(track), List.of(),
+                List.of());
     }
 
     private static Track track(String id, List<SweepFrame> frames, BoundaryKind kind,

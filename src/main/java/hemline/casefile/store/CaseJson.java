@@ -4,6 +4,7 @@ import com.fasterxml.jackson.annotation.JsonFormat;
 import com.fasterxml.jackson.annotation.JsonIgnoreProperties;
 import com.fasterxml.jackson.annotation.JsonValue;
 import com.fasterxml.jackson.core.JsonFactory;
+import com.fasterxml.jackson.core.JsonGenerator;
 import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
@@ -56,7 +57,8 @@ final class CaseJson {
                 .enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER).build();
         SimpleModule doubles = new SimpleModule("doubles")
                 .addSerializer(double.class, new DoubleWriter()).addSerializer(Double.class, new DoubleWriter())
-                .addDeserializer(double.class, new DoubleReader());
+                .addDeserializer(double.class, new DoubleReader())
+                .addSerializer(Point.class, new PointWriter()).addDeserializer(Point.class, new PointReader());
         JsonMapper.Builder builder = JsonMapper.builder(factory)
                 .disable(MapperFeature.ALLOW_COERCION_OF_SCALARS)
                 .disable(DeserializationFeature.ACCEPT_FLOAT_AS_INT)
@@ -65,10 +67,7 @@ final class CaseJson {
                 .enable(DeserializationFeature.FAIL_ON_NUMBERS_FOR_ENUMS)
                 .enable(DeserializationFeature.FAIL_ON_TRAILING_TOKENS)
                 .addModule(new Jdk8Module()).addModule(doubles)
-                .addMixIn(Speed.class, SpeedForm.class);
-        for (Class<?> flat : List.of(Point.class, TrackVertex.class)) {
-            builder.addMixIn(flat, FlatForm.class);
-        }
+                .addMixIn(Speed.class, SpeedForm.class).addMixIn(TrackVertex.class, FlatForm.class);
         for (Class<?> named : List.of(BoundaryKind.class, Origin.class, Meeting.Status.class, AsideReason.class,
                 Extent.class, MeetingVerdict.class, ReviewOutcome.class)) {
             builder.addMixIn(named, LabelForm.class);
@@ -101,7 +100,7 @@ final class CaseJson {
         }
 
         @Override
-        public void serialize(Double value, com.fasterxml.jackson.core.JsonGenerator to, SerializerProvider provider)
+        public void serialize(Double value, JsonGenerator to, SerializerProvider provider)
                 throws IOException {
             if (value.isNaN()) {
                 to.writeNull();
@@ -136,6 +135,52 @@ final class CaseJson {
         @Override
         public Double getNullValue(DeserializationContext context) {
             return Double.NaN;
+        }
+    }
+
+    private static final class PointWriter extends StdScalarSerializer<Point> {
+        private static final long serialVersionUID = 1L;
+
+        PointWriter() {
+            super(Point.class);
+        }
+
+        @Override
+        public void serialize(Point value, JsonGenerator to, SerializerProvider provider) throws IOException {
+            to.writeStartArray();
+            to.writeNumber(value.xKm());
+            to.writeNumber(value.yKm());
+            to.writeEndArray();
+        }
+    }
+
+    /** Exactly two finite numbers. */
+    private static final class PointReader extends StdScalarDeserializer<Point> {
+        private static final long serialVersionUID = 1L;
+
+        PointReader() {
+            super(Point.class);
+        }
+
+        @Override
+        public Point deserialize(JsonParser from, DeserializationContext context) throws IOException {
+            if (from.currentToken() != JsonToken.START_ARRAY) {
+                return (Point) context.handleUnexpectedToken(Point.class, from);
+            }
+            double xKm = number(from, context);
+            double yKm = number(from, context);
+            if (from.nextToken() != JsonToken.END_ARRAY) {
+                return (Point) context.handleUnexpectedToken(Point.class, from);
+            }
+            return new Point(xKm, yKm);
+        }
+
+        private static double number(JsonParser from, DeserializationContext context) throws IOException {
+            JsonToken token = from.nextToken();
+            if (token == null || !token.isNumeric() || !Double.isFinite(from.getDoubleValue())) {
+                return ((Point) context.handleUnexpectedToken(Point.class, from)).xKm();
+            }
+            return from.getDoubleValue();
         }
     }
 }

@@ -116,10 +116,12 @@ public final class CaseStore implements Closeable {
             lastSum = folder.replaceLog(entries);
         }
         log = folder.appendToLog();
-        if (!text.patched() && text.torn().length > 0) {
+        if (!text.patched()) {
+            // Also forces what a killed program wrote but did not live to force.
             log.truncate(text.goodBytes());
-        } else if (!text.patched() && text.unended()) {
-            log.append(new byte[] {'\n'});
+            if (text.unended()) {
+                log.append(new byte[] {'\n'});
+            }
         }
         for (String words : done) {
             notes.add(words);

@@ -35,7 +35,7 @@ public record DetectionSettings(double maxRangeKm, double pixelKm, double maxSpe
     }
 
     public static DetectionSettings defaults() {
-        return new DetectionSettings(150, 0.5, 30, 2, false, 1, 6);
+        return new DetectionSettings(150, 0.5, 30, 2, false, 0.1, 6);
     }
 
     public DetectionSettings withMaxRangeKm(double rangeKm) {

@@ -23,16 +23,21 @@ final class StripResponses {
     private static final double FAR_KM = 4;
     private static final double BEYOND_KM = 7;
     private static final float LEAST_WEIGHT = 0.35f;
-    /** Root mean square of the second difference of white strips over their own. */
-    private static final float SECOND_DIFFERENCE_GAIN = 1.15f;
+    /** Root mean square of the second and first differences of white strips over their own. */
+    private static final float EVEN_GAIN = 1.15f;
+    private static final float ODD_GAIN = 1.3f;
+    private static final float EVEN_CLIP_DB = 3;
+    private static final float ODD_CLIP_DB = 4;
 
     final PlaneGrid grid;
     /** {@code [orientation][coarse pixel]} even part, dB. */
     final float[][] ridge = new float[Orientations.COUNT][];
     /** {@code [signed normal][coarse pixel]} odd part, dB. */
     final float[][] step = new float[Orientations.SIGNED][];
-    /** {@code [coarse pixel]} mean square of the clipped second differences over all directions, dB². */
-    final float[] noise;
+    /** {@code [coarse pixel]} mean square of the clipped second differences over all directions, as of strips, dB². */
+    final float[] evenNoise;
+    /** {@code [coarse pixel]} mean square of the clipped first differences over all directions, as of strips, dB². */
+    final float[] oddNoise;
     private final float[] noiseCount;
 
     private final int width;
@@ -45,7 +50,8 @@ final class StripResponses {
         width = fine.width();
         pad = (int) Math.ceil(BEYOND_KM / fine.spacingKm()) + 1;
         stride = width + 2 * pad;
-        noise = new float[grid.size()];
+        evenNoise = new float[grid.size()];
+        oddNoise = new float[grid.size()];
         noiseCount = new float[grid.size()];
         float[] value = new float[fine.size()];
         float[] weight = raster.weight().clone();
@@ -69,9 +75,10 @@ final class StripResponses {
                 work.respond(turnedValue, turnedWeight, north, east, o, true);
             }
         }
-        for (int i = 0; i < noise.length; i++) {
-            noise[i] = noiseCount[i] > 0
-                    ? noise[i] / noiseCount[i] / (SECOND_DIFFERENCE_GAIN * SECOND_DIFFERENCE_GAIN) : Float.NaN;
+        for (int i = 0; i < noiseCount.length; i++) {
+            float known = noiseCount[i] > 0 ? noiseCount[i] : Float.NaN;
+            evenNoise[i] /= known * EVEN_GAIN * EVEN_GAIN;
+            oddNoise[i] /= known * ODD_GAIN * ODD_GAIN;
         }
     }
 
@@ -81,8 +88,8 @@ final class StripResponses {
         private final float[] sums = new float[width * width];
         private final float[] weights = new float[width * width];
         private final float[] strip = new float[stride * stride];
-        private final float[][] rows = new float[4][width];
-        private final float[][] planes = new float[4][grid.size()];
+        private final float[][] rows = new float[5][width];
+        private final float[][] planes = new float[5][grid.size()];
 
         Work() {
             Arrays.fill(strip, Float.NaN);
@@ -115,10 +122,11 @@ final class StripResponses {
             ridge[o] = upright[0];
             step[o] = upright[1];
             step[o + Orientations.COUNT] = upright[2];
-            for (int i = 0; i < noise.length; i++) {
+            for (int i = 0; i < noiseCount.length; i++) {
                 float squared = upright[3][i];
                 if (!Float.isNaN(squared)) {
-                    noise[i] += squared;
+                    evenNoise[i] += squared;
+                    oddNoise[i] += upright[4][i];
                     noiseCount[i]++;
                 }
             }
@@ -155,7 +163,8 @@ final class StripResponses {
             float[] even = rows[0];
             float[] ahead = rows[1];
             float[] behind = rows[2];
-            float[] squared = rows[3];
+            float[] evenSquared = rows[3];
+            float[] oddSquared = rows[4];
             for (int x = 0; x < width; x++) {
                 int p = centre + x;
                 float c = s[p];
@@ -168,8 +177,10 @@ final class StripResponses {
                 float sideA = 0.35f * a + 0.65f * Math.min(a1, a2);
                 float sideB = 0.35f * b + 0.65f * Math.min(b1, b2);
                 even[x] = c - Math.max(sideA, sideB) - 2 * Math.max(0, c - 19.5f);
-                float second = Math.max(-3, Math.min(3, c - 0.5f * (a + b)));
-                squared[x] = second * second;
+                float second = Math.max(-EVEN_CLIP_DB, Math.min(EVEN_CLIP_DB, c - 0.5f * (a + b)));
+                float first = Math.max(-ODD_CLIP_DB, Math.min(ODD_CLIP_DB, a - b));
+                evenSquared[x] = second * second;
+                oddSquared[x] = first * first;
                 float a7 = s[p + beyond];
                 float b7 = s[p - beyond];
                 float riseA = Math.max(0, a7 - a);

@@ -21,12 +21,14 @@ final class SweepEvidence {
     final PlaneGrid grid;
     /** {@code [signed normal][coarse pixel]}. */
     final byte[][] planes = new byte[Orientations.SIGNED][];
-    private final float[] noiseDb;
+    private final float[] evenNoiseDb;
+    private final float[] oddNoiseDb;
 
     SweepEvidence(StripResponses strips, RainMap rain) {
         grid = strips.grid;
         boolean[] inRain = inRain(rain);
-        noiseDb = localNoise(strips, inRain);
+        evenNoiseDb = localNoise(strips.evenNoise, inRain);
+        oddNoiseDb = localNoise(strips.oddNoise, inRain);
         for (int d = 0; d < Orientations.SIGNED; d++) {
             planes[d] = plane(strips.ridge[d % Orientations.COUNT], strips.step[d], inRain);
         }
@@ -46,12 +48,12 @@ final class SweepEvidence {
         return within;
     }
 
-    private float[] localNoise(StripResponses strips, boolean[] inRain) {
+    private float[] localNoise(float[] squared, boolean[] inRain) {
         float[] sum = new float[grid.size()];
         float[] count = new float[grid.size()];
         for (int i = 0; i < sum.length; i++) {
-            if (!inRain[i] && !Float.isNaN(strips.noise[i])) {
-                sum[i] = strips.noise[i];
+            if (!inRain[i] && !Float.isNaN(squared[i])) {
+                sum[i] = squared[i];
                 count[i] = 1;
             }
         }
@@ -72,18 +74,13 @@ final class SweepEvidence {
             if (inRain[i] || Float.isNaN(ridge[i])) {
                 continue;
             }
-            float r = ridge[i] / noiseDb[i];
-            float s = Float.isNaN(step[i]) ? 0 : step[i] / noiseDb[i];
+            float r = ridge[i] / evenNoiseDb[i];
+            float s = Float.isNaN(step[i]) ? 0 : step[i] / oddNoiseDb[i];
             float line = r + 0.25f * Math.max(-2, Math.min(2.5f, s));
             float arc = 0.6f * (s - 1.2f);
             float e = Math.max(LEAST, Math.min(MOST, Math.max(line, arc)));
             plane[i] = (byte) Math.round(UNITS * e);
         }
         return plane;
-    }
-
-    /** Background standard deviation at a coarse pixel, dB. */
-    float noiseDb(int pixel) {
-        return noiseDb[pixel];
     }
 }

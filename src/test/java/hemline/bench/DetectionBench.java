@@ -27,6 +27,7 @@ import hemline.sweep.ScreenedLoop;
 import hemline.sweep.SweepFrame;
 import hemline.tracking.Tracking;
 import hemline.tracking.TrackingSettings;
+import java.io.PrintStream;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -34,7 +35,7 @@ import java.util.Locale;
 
 /**
  * Runs invented loops through screening, detection and linking and prints how much of the truth each finds.
- * Arguments: {@code --scenes a,b} {@code --radars a,b} {@code --seeds 1,2} {@code --pictures DIR} {@code --threads N}.
+ * Arguments: {@code --scenes a,b} {@code --radars a,b} {@code --seeds 1,2} {@code --pictures DIR} {@code --threads N} {@code --curves FILE}.
  */
 public final class DetectionBench {
     private final List<String> scenes;
@@ -42,15 +43,18 @@ public final class DetectionBench {
     private final List<Long> seeds;
     private final Path pictures;
     private final int threads;
+    private final CurveList curves;
     private final List<Score> detected = new ArrayList<>();
     private final List<Score> linked = new ArrayList<>();
 
-    private DetectionBench(String[] args) {
+    private DetectionBench(String[] args) throws Exception {
         scenes = names(args, "--scenes", Scenes.names());
         radars = names(args, "--radars", Radars.names());
         seeds = names(args, "--seeds", List.of("1")).stream().map(Long::valueOf).toList();
         String dir = value(args, "--pictures");
         pictures = dir == null ? null : Path.of(dir);
+        String list = value(args, "--curves");
+        curves = list == null ? null : new CurveList(new PrintStream(list));
         String number = value(args, "--threads");
         threads = number == null ? 1 : Integer.parseInt(number);
     }
@@ -111,6 +115,9 @@ public final class DetectionBench {
         linked.add(whole);
         line(scene + " " + radar + " " + seed, alone, whole, (learned - start) / 1e6 / loop.size(),
                 (end - learned) / 1e6 / loop.size());
+        if (curves != null) {
+            curves.add(scene + "/" + radar + "/" + seed, found, truth);
+        }
         if (pictures != null) {
             DetectionPictures.write(pictures, scene + "-" + radar + "-" + seed, screened, found, truth);
         }

@@ -3,6 +3,7 @@ package hemline.viewer;
 import hemline.viewer.render.RasterFeed;
 import hemline.viewer.view.ChooserAsk;
 import hemline.viewer.view.ViewerWindow;
+import hemline.viewer.viewmodel.SettingsKeeper;
 import hemline.viewer.viewmodel.ViewerModel;
 import hemline.workflow.ViewerRequest;
 import hemline.workflow.ViewerStart;
@@ -46,8 +47,15 @@ public final class FxViewerStart implements ViewerStart {
 
     private void show(ViewerRequest request, ExecutorService work, ExecutorService draw, CountDownLatch closed) {
         ViewerModel model = new ViewerModel(request.opener(), work, draw, Platform::runLater, Clock.systemUTC());
+        SettingsKeeper keeper = new SettingsKeeper(SettingsPlace.file(System.getenv(), System.getProperty("os.name"),
+                System.getProperty("user.home"), System.getProperty(SettingsPlace.OVERRIDE)), model);
+        model.job().attempt("Reading the settings", keeper::load);
         Stage stage = new Stage();
-        new ViewerWindow(stage, model, new RasterFeed(draw, Platform::runLater), new ChooserAsk());
+        ViewerWindow window = new ViewerWindow(stage, model, new RasterFeed(draw, Platform::runLater), new ChooserAsk());
+        stage.setOnHiding(e -> {
+            window.closing();
+            model.job().attempt("Keeping the settings", keeper::save);
+        });
         stage.setOnHidden(e -> {
             model.job().cancel();
             closed.countDown();

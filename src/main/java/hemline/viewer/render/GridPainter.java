@@ -5,17 +5,14 @@ import hemline.geodesy.LocalPlane;
 import hemline.geometry.Point;
 import hemline.viewer.viewmodel.NiceSteps;
 import hemline.viewer.viewmodel.Overlay;
-import hemline.viewer.viewmodel.StatusModel;
 import hemline.viewer.viewmodel.ViewTransform;
 import hemline.viewer.viewmodel.Words;
 import javafx.scene.canvas.GraphicsContext;
 
-/** Range rings, azimuth ticks, the height ceiling and the graticule; their spacing follows the zoom. */
+/** Numbers of the rings, azimuth ticks and the graticule; their spacing follows the zoom. */
 final class GridPainter {
-    private static final double LEAST_RING_PX = 95;
     private static final double LEAST_GRATICULE_PX = 110;
     private static final int CURVE_POINTS = 24;
-    private static final Point CENTRE = new Point(0, 0);
 
     void paint(GraphicsContext g, PlaneScene scene) {
         ViewTransform view = scene.view();
@@ -25,53 +22,32 @@ final class GridPainter {
         if (scene.shows(Overlay.GRATICULE)) {
             scene.session().site().position().ifPresent(radar -> graticule(g, view, radar, letters));
         }
-        double farKm = farthestKm(view);
-        double step = NiceSteps.step(LEAST_RING_PX / view.pxPerKm());
         if (scene.shows(Overlay.RINGS)) {
-            rings(g, view, farKm, step, letters);
+            ringNumbers(g, view, letters);
         }
         if (scene.shows(Overlay.CEILING)) {
-            ceiling(g, scene);
+            Point at = Point.towards(225).times(Rings.ceilingKm(scene));
+            letters.plate(g, "beam " + Words.number(scene.session().heightCeilingM() / 1000, 1) + " km up",
+                    view.screenX(at), view.screenY(at), Inks.CEILING);
         }
         if (scene.shows(Overlay.AZIMUTHS)) {
             azimuths(g, view, letters);
         }
     }
 
-    private static double farthestKm(ViewTransform view) {
-        double halfDiagonal = Math.hypot(view.widthPx(), view.heightPx()) / 2 / view.pxPerKm();
-        return Math.min(1000, view.centre().lengthKm() + halfDiagonal);
-    }
-
-    private static void rings(GraphicsContext g, ViewTransform view, double farKm, double step,
-                              Letters letters) {
-        double nearKm = Math.max(0, view.centre().lengthKm()
-                - Math.hypot(view.widthPx(), view.heightPx()) / 2 / view.pxPerKm());
-        g.setStroke(Inks.GRID);
-        for (double range : NiceSteps.multiples(Math.max(step, nearKm), farKm, step)) {
-            Lines.circle(g, view, CENTRE, range);
+    private static void ringNumbers(GraphicsContext g, ViewTransform view, Letters letters) {
+        double step = Rings.stepKm(view);
+        for (double range : Rings.rangesKm(view)) {
             // Along one bearing, so that the numbers read as a scale.
             Point at = Point.towards(45).times(range);
             letters.plate(g, Words.number(range, step < 1 ? 1 : 0) + " km", view.screenX(at), view.screenY(at),
                     Inks.GRID_TEXT);
         }
+        g.setStroke(Inks.GRID);
         double x = view.screenX(0);
         double y = view.screenY(0);
         g.strokeLine(x - 5, y, x + 5, y);
         g.strokeLine(x, y - 5, x, y + 5);
-    }
-
-    private static void ceiling(GraphicsContext g, PlaneScene scene) {
-        ViewTransform view = scene.view();
-        double rangeKm = StatusModel.ceilingRangeKm(scene.session().frames().get(scene.index()).beam(),
-                scene.session().heightCeilingM());
-        g.setStroke(Inks.CEILING);
-        g.setLineDashes(Inks.FAINT);
-        Lines.circle(g, view, CENTRE, rangeKm);
-        g.setLineDashes(Inks.SOLID);
-        Point at = Point.towards(225).times(rangeKm);
-        scene.letters().plate(g, "beam " + Words.number(scene.session().heightCeilingM() / 1000, 1) + " km up",
-                view.screenX(at), view.screenY(at), Inks.CEILING);
     }
 
     /** Ticks where the bearings from the radar leave the view. */

@@ -17,10 +17,12 @@ final class PolarMap {
 
     private final int width;
     private final int height;
+    private final double pixelsPerUnit;
     private final int[] bins;
 
     /** @param pixelsPerUnit device pixels a unit of the view, 1 on an ordinary screen */
     PolarMap(ViewTransform view, double pixelsPerUnit) {
+        this.pixelsPerUnit = pixelsPerUnit;
         width = (int) Math.ceil(view.widthPx() * pixelsPerUnit);
         height = (int) Math.ceil(view.heightPx() * pixelsPerUnit);
         bins = new int[width * height];
@@ -41,6 +43,10 @@ final class PolarMap {
 
     int width() {
         return width;
+    }
+
+    double pixelsPerUnit() {
+        return pixelsPerUnit;
     }
 
     int height() {

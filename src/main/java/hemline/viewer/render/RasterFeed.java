@@ -4,6 +4,7 @@ import hemline.viewer.viewmodel.PlaneField;
 import hemline.viewer.viewmodel.SweepStore;
 import hemline.viewer.viewmodel.ViewTransform;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Executor;
@@ -38,14 +39,15 @@ public final class RasterFeed {
     private ViewTransform mapView;
     private double mapScale;
 
-    private record Wish(SweepStore store, int index, PlaneField field, ViewTransform view, double scale) {
+    private record Wish(SweepStore store, int index, PlaneField field, ViewTransform view, List<Ring> rings,
+                        double scale) {
         Wish at(int otherIndex) {
-            return new Wish(store, otherIndex, field, view, scale);
+            return new Wish(store, otherIndex, field, view, rings, scale);
         }
 
         boolean samePlace(Wish other) {
             return other != null && store == other.store && field == other.field && view.equals(other.view)
-                    && scale == other.scale;
+                    && rings.equals(other.rings) && scale == other.scale;
         }
     }
 
@@ -57,16 +59,17 @@ public final class RasterFeed {
     /**
      * Asks for a picture; {@link #rasterProperty} brings it, at once when it is ready.
      *
-     * @param size      sweeps in the loop
+     * @param scene     the sweep, the view and the rings
      * @param direction +1 when later sweeps are likely to be asked for next, −1 for earlier ones
      * @param scale     device pixels a unit of the view
      */
-    public void want(SweepStore store, int index, PlaneField field, ViewTransform view, int size, int direction,
-                     double scale) {
+    public void want(SweepStore store, PlaneScene scene, PlaneField field, int direction, double scale) {
+        ViewTransform view = scene.view();
+        int size = scene.session().frames().size();
         if (view.widthPx() < 1 || view.heightPx() < 1) {
             return;
         }
-        Wish wish = new Wish(store, index, field, view, scale);
+        Wish wish = new Wish(store, scene.index(), field, view, Rings.of(scene), scale);
         wanted = wish;
         SweepRaster ready = kept.get(wish);
         if (ready != null) {
@@ -119,7 +122,7 @@ public final class RasterFeed {
     }
 
     private void paint(Wish wish, LevelGrid grid, Runnable afterwards) {
-        SweepRaster drawn = SweepRaster.draw(grid, mapFor(wish.view(), wish.scale()), wish.view(), wish.index(),
+        SweepRaster drawn = SweepRaster.draw(grid, mapFor(wish.view(), wish.scale()), wish.rings(), wish.view(), wish.index(),
                 wish.field());
         ui.execute(() -> {
             kept.put(wish, drawn);

@@ -10,7 +10,6 @@ import hemline.viewer.viewmodel.Motion;
 import hemline.viewer.viewmodel.Overlay;
 import hemline.viewer.viewmodel.ViewTransform;
 import hemline.viewer.viewmodel.ViewerModel;
-import hemline.workflow.LoopSession;
 import java.util.EnumSet;
 import java.util.Objects;
 import java.util.Set;
@@ -97,15 +96,14 @@ final class PlaneView extends Region {
     }
 
     private void paint() {
-        LoopSession session = model.session();
-        if (session == null || getWidth() < 1 || getHeight() < 1) {
+        if (model.session() == null || getWidth() < 1 || getHeight() < 1) {
             return;
         }
         double scale = getScene() == null || getScene().getWindow() == null ? 1 : getScene().getWindow().getOutputScaleX();
-        feed.want(model.store(), model.loop().index(), model.plane().fieldProperty().get(), model.plane().view(),
-                session.frames().size(), direction, scale);
+        PlaneScene scene = scene();
+        feed.want(model.store(), scene, model.plane().fieldProperty().get(), direction, scale);
         placeSweep();
-        painter.paint(overlays.getGraphicsContext2D(), scene());
+        painter.paint(overlays.getGraphicsContext2D(), scene);
         setAccessibleText(PlaneWords.of(model));
     }
 

@@ -4,6 +4,7 @@ import hemline.viewer.render.RasterFeed;
 import hemline.viewer.viewmodel.Desk;
 import hemline.viewer.viewmodel.ViewerActions;
 import hemline.viewer.viewmodel.ViewerModel;
+import hemline.viewer.viewmodel.WindowPlace;
 import java.io.File;
 import java.util.List;
 import javafx.animation.AnimationTimer;
@@ -17,6 +18,7 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
+import javafx.stage.Screen;
 import javafx.stage.Stage;
 
 /** One window: read-out on top, plane beside ledger and traces, rail and status line below. */
@@ -33,6 +35,7 @@ public final class ViewerWindow {
     private final StackPane veil = new StackPane();
     private final CommandSearch search;
     private final ShortcutSheet shortcuts;
+    private final AnimationTimer ticking;
     private Node focusedBefore;
 
     public ViewerWindow(Stage stage, ViewerModel model, RasterFeed feed, WindowDesk.Ask ask) {
@@ -75,8 +78,31 @@ public final class ViewerWindow {
         stage.setMinHeight(560);
         stage.setTitle("Hemline");
         model.sessionProperty().addListener((o, was, now) -> stage.setTitle("Hemline \u2013 " + now.title()));
-        clock().start();
+        ticking = clock();
+        ticking.start();
+        WindowPlace kept = model.settings().windowProperty().get();
+        if (kept != null) {
+            place(kept);
+        }
         planePane.plane().requestFocus();
+    }
+
+    /** Where the window was, unless that screen is gone. */
+    private void place(WindowPlace kept) {
+        if (!Screen.getScreensForRectangle(kept.x(), kept.y(), kept.width(), kept.height()).isEmpty()) {
+            stage.setX(kept.x());
+            stage.setY(kept.y());
+            stage.setWidth(kept.width());
+            stage.setHeight(kept.height());
+            stage.setMaximized(kept.maximised());
+        }
+    }
+
+    /** Stops the clock and keeps where the window is; call when it closes. */
+    public void closing() {
+        ticking.stop();
+        model.settings().windowProperty().set(new WindowPlace((int) stage.getX(), (int) stage.getY(),
+                (int) stage.getWidth(), (int) stage.getHeight(), stage.isMaximized()));
     }
 
     private void showSide() {

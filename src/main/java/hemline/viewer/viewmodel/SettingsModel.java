@@ -1,12 +1,21 @@
 package hemline.viewer.viewmodel;
 
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.DoubleProperty;
+import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleDoubleProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableList;
 
 /** What a user may choose once and keep: theme, text size, local time, side panel. */
 public final class SettingsModel {
+    private static final int MOST_RECENT = 8;
+
     private final BooleanProperty dark = new SimpleBooleanProperty(this, "dark", true);
     private final BooleanProperty localTime = new SimpleBooleanProperty(this, "localTime", false);
     private final BooleanProperty sidePanel = new SimpleBooleanProperty(this, "sidePanel", true);
@@ -17,11 +26,33 @@ public final class SettingsModel {
         }
     };
 
+    private final ObjectProperty<WindowPlace> window = new SimpleObjectProperty<>(this, "window");
+    private final ObservableList<Path> recent = FXCollections.observableArrayList();
+
+    /** Puts a path in front of those opened before. */
+    public void remember(Path path) {
+        List<Path> paths = new ArrayList<>(recent);
+        paths.remove(path);
+        paths.add(0, path);
+        recent.setAll(paths.subList(0, Math.min(MOST_RECENT, paths.size())));
+    }
+
+    /** Back to the usual; what was opened before stays. */
     public void reset() {
         dark.set(true);
         localTime.set(false);
         sidePanel.set(true);
         textScale.set(1);
+    }
+
+    /** Where the window was; null when never kept. */
+    public ObjectProperty<WindowPlace> windowProperty() {
+        return window;
+    }
+
+    /** Paths opened before, newest first. */
+    public ObservableList<Path> recent() {
+        return recent;
     }
 
     public BooleanProperty darkProperty() {

@@ -1,12 +1,15 @@
 package hemline.viewer.viewmodel;
 
+import hemline.boundary.Meeting;
 import hemline.boundary.Track;
 import hemline.geometry.Point;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.BooleanBinding;
 import javafx.beans.property.BooleanProperty;
@@ -44,8 +47,28 @@ public final class ViewerActions {
 
     /** Actions that fit what was typed, best first; all of them for nothing typed. */
     public List<Action> search(String typed) {
-        return actions.stream().filter(a -> a.fit(typed) > 0)
+        return Stream.concat(actions.stream(), passing().stream()).filter(a -> a.fit(typed) > 0)
                 .sorted(Comparator.comparingInt((Action a) -> a.fit(typed)).reversed()).toList();
+    }
+
+    /** What can be done with what happens to be open: go to a track or a meeting, open a recent path. */
+    private List<Action> passing() {
+        List<Action> now = new ArrayList<>();
+        for (Track track : model.ledger().tracks()) {
+            now.add(once("track-" + track.id(), "Selection", "Go to track " + track.id(), () -> model.goToTrack(track.id())));
+        }
+        for (Meeting meeting : model.ledger().meetings()) {
+            now.add(once("meeting-" + meeting.id(), "Selection", "Go to meeting " + meeting.id(),
+                    () -> model.goToMeeting(meeting.id())));
+        }
+        for (Path path : model.settings().recent()) {
+            now.add(once("recent-" + path, "Window", "Open again: " + path, () -> model.open(List.of(path))));
+        }
+        return now;
+    }
+
+    private Action once(String id, String heading, String words, Runnable run) {
+        return new Action(id, heading, words, List.of(), always, Optional.empty(), run);
     }
 
     private void loop() {

@@ -70,7 +70,10 @@ public final class ViewerModel {
     public void open(List<Path> paths) {
         job.start("Opening", progress -> {
             LoopSession read = opener.open(paths, progress);
-            post(progress, () -> show(read, true));
+            post(progress, () -> {
+                show(read, true);
+                paths.forEach(path -> settings.remember(path.toAbsolutePath()));
+            });
             if (!read.analysed()) {
                 LoopSession done = opener.analyse(read, progress);
                 post(progress, () -> show(done, false));

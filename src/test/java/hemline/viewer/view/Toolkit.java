@@ -20,7 +20,12 @@ import org.testfx.util.WaitForAsyncUtils;
 
 /** One viewer window under the headless toolkit, with questions answered by the test. */
 final class Toolkit implements WindowDesk.Ask, AutoCloseable {
+    /** On a busy machine a window takes its time; a test must fail for what it shows, not for that. */
+    private static final int PATIENCE_S = 240;
+
     static {
+        System.setProperty("testfx.launch.timeout", String.valueOf(1000 * PATIENCE_S));
+        System.setProperty("testfx.setup.timeout", String.valueOf(1000 * PATIENCE_S));
         // The robot's usual pauses are for people who watch.
         System.setProperty("testfx.robot.move_max_count", "3");
         System.setProperty("testfx.robot.write_sleep", "0");
@@ -61,7 +66,7 @@ final class Toolkit implements WindowDesk.Ask, AutoCloseable {
     }
 
     static <T> T onFx(java.util.concurrent.Callable<T> call) throws Exception {
-        return WaitForAsyncUtils.waitForAsyncFx(20_000, call);
+        return WaitForAsyncUtils.waitForAsyncFx(PATIENCE_S * 1000, call);
     }
 
     static void run(Runnable change) throws Exception {
@@ -77,7 +82,7 @@ final class Toolkit implements WindowDesk.Ask, AutoCloseable {
     }
 
     static void await(BooleanSupplier condition) throws Exception {
-        WaitForAsyncUtils.waitFor(20, TimeUnit.SECONDS, () -> onFx(condition::getAsBoolean));
+        WaitForAsyncUtils.waitFor(PATIENCE_S, TimeUnit.SECONDS, () -> onFx(condition::getAsBoolean));
         settle();
     }
 

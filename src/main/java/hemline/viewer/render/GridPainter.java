@@ -26,7 +26,7 @@ final class GridPainter {
             ringNumbers(g, view, letters);
         }
         if (scene.shows(Overlay.CEILING)) {
-            Point at = Point.towards(225).times(Rings.ceilingKm(scene));
+            Point at = Point.towards(225).times(Backdrop.ceilingKm(scene));
             letters.plate(g, "beam " + Words.number(scene.session().heightCeilingM() / 1000, 1) + " km up",
                     view.screenX(at), view.screenY(at), Inks.CEILING);
         }
@@ -36,8 +36,8 @@ final class GridPainter {
     }
 
     private static void ringNumbers(GraphicsContext g, ViewTransform view, Letters letters) {
-        double step = Rings.stepKm(view);
-        for (double range : Rings.rangesKm(view)) {
+        double step = Backdrop.stepKm(view);
+        for (double range : Backdrop.rangesKm(view)) {
             // Along one bearing, so that the numbers read as a scale.
             Point at = Point.towards(45).times(range);
             letters.plate(g, Words.number(range, step < 1 ? 1 : 0) + " km", view.screenX(at), view.screenY(at),

@@ -12,6 +12,10 @@ public final class Inks {
     public static final Color SELECTED = Color.WHITE;
     static final Color GRID = Color.web("#93a4b8", 0.42);
     static final Color GRID_TEXT = Color.web("#c3cfdd");
+    static final Color COAST = Color.web("#b8d4e3", 0.8);
+    static final Color BORDER = Color.web("#d7d2c4", 0.75);
+    static final Color STATE_BORDER = Color.web("#d7d2c4", 0.45);
+    static final Color OWN_MAP = Color.web("#b9f0d2", 0.7);
     static final Color CEILING = Color.web("#e9c46a", 0.75);
     public static final Color MEETING = Color.web("#ffffff");
     static final Color MEASURE = Color.web("#7dffce");

@@ -54,6 +54,10 @@ public final class LegendPainter {
                 g.fillText("\u00b0", 16, 14);
             }
             case CEILING -> line(g, Inks.CEILING, 1, middle, Inks.FAINT);
+            case MAP -> {
+                Lines.pen(g, Inks.COAST, 1);
+                g.strokePolyline(new double[] {2, 9, 15, 22, 32}, new double[] {12, 5, 9, 3, 7}, 5);
+            }
             case GRATICULE -> {
                 line(g, Inks.GRID, 1, middle, Inks.SOLID);
                 Lines.pen(g, Inks.GRID, 1);

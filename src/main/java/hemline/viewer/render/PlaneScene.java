@@ -1,6 +1,7 @@
 package hemline.viewer.render;
 
 import hemline.boundary.Track;
+import hemline.viewer.viewmodel.MapLine;
 import hemline.viewer.viewmodel.MeasureModel.Mark;
 import hemline.viewer.viewmodel.Overlay;
 import hemline.viewer.viewmodel.ViewTransform;
@@ -19,10 +20,12 @@ import java.util.Set;
  * @param track    id of the selected track, empty for none
  * @param meeting  id of the selected meeting, empty for none
  * @param marks    of the measure tool, none to two
+ * @param map      lines of the base map and of the user's own
  * @param letters  fonts at the user's text size
  */
 public record PlaneScene(LoopSession session, int index, ViewTransform view, Set<Overlay> shown, String track,
-                         String meeting, List<Mark> marks, Letters letters) {
+                         String meeting, List<Mark> marks, List<MapLine> map,
+                         Letters letters) {
 
     boolean shows(Overlay overlay) {
         return shown.contains(overlay);

@@ -4,7 +4,6 @@ import hemline.viewer.viewmodel.PlaneField;
 import hemline.viewer.viewmodel.SweepStore;
 import hemline.viewer.viewmodel.ViewTransform;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Executor;
@@ -39,15 +38,15 @@ public final class RasterFeed {
     private ViewTransform mapView;
     private double mapScale;
 
-    private record Wish(SweepStore store, int index, PlaneField field, ViewTransform view, List<Ring> rings,
+    private record Wish(SweepStore store, int index, PlaneField field, ViewTransform view, Backdrop backdrop,
                         double scale) {
         Wish at(int otherIndex) {
-            return new Wish(store, otherIndex, field, view, rings, scale);
+            return new Wish(store, otherIndex, field, view, backdrop, scale);
         }
 
         boolean samePlace(Wish other) {
             return other != null && store == other.store && field == other.field && view.equals(other.view)
-                    && rings.equals(other.rings) && scale == other.scale;
+                    && backdrop.equals(other.backdrop) && scale == other.scale;
         }
     }
 
@@ -59,7 +58,7 @@ public final class RasterFeed {
     /**
      * Asks for a picture; {@link #rasterProperty} brings it, at once when it is ready.
      *
-     * @param scene     the sweep, the view and the rings
+     * @param scene     the sweep, the view and its backdrop
      * @param direction +1 when later sweeps are likely to be asked for next, −1 for earlier ones
      * @param scale     device pixels a unit of the view
      */
@@ -69,7 +68,7 @@ public final class RasterFeed {
         if (view.widthPx() < 1 || view.heightPx() < 1) {
             return;
         }
-        Wish wish = new Wish(store, scene.index(), field, view, Rings.of(scene), scale);
+        Wish wish = new Wish(store, scene.index(), field, view, Backdrop.of(scene), scale);
         wanted = wish;
         SweepRaster ready = kept.get(wish);
         if (ready != null) {
@@ -122,7 +121,7 @@ public final class RasterFeed {
     }
 
     private void paint(Wish wish, LevelGrid grid, Runnable afterwards) {
-        SweepRaster drawn = SweepRaster.draw(grid, mapFor(wish.view(), wish.scale()), wish.rings(), wish.view(), wish.index(),
+        SweepRaster drawn = SweepRaster.draw(grid, mapFor(wish.view(), wish.scale()), wish.backdrop(), wish.view(), wish.index(),
                 wish.field());
         ui.execute(() -> {
             kept.put(wish, drawn);

@@ -3,7 +3,6 @@ package hemline.viewer.render;
 import hemline.viewer.viewmodel.PlaneField;
 import hemline.viewer.viewmodel.ViewTransform;
 import java.nio.IntBuffer;
-import java.util.List;
 import javafx.scene.image.Image;
 import javafx.scene.image.PixelBuffer;
 import javafx.scene.image.PixelFormat;
@@ -19,12 +18,12 @@ import javafx.scene.image.WritableImage;
  */
 public record SweepRaster(Image image, ViewTransform view, int index, PlaneField field) {
 
-    /** @param rings drawn over the sweep */
-    static SweepRaster draw(LevelGrid grid, PolarMap map, List<Ring> rings, ViewTransform view, int index,
+    /** @param backdrop drawn over the sweep */
+    static SweepRaster draw(LevelGrid grid, PolarMap map, Backdrop backdrop, ViewTransform view, int index,
                             PlaneField field) {
         int[] argb = new int[map.width() * map.height()];
         grid.paint(map, argb);
-        rings.forEach(ring -> ring.paint(argb, map.width(), map.height(), view, map.pixelsPerUnit()));
+        backdrop.paint(new PixelPen(argb, map.width(), map.height()), view, map.pixelsPerUnit());
         PixelBuffer<IntBuffer> pixels = new PixelBuffer<>(map.width(), map.height(), IntBuffer.wrap(argb),
                 PixelFormat.getIntArgbPreInstance());
         return new SweepRaster(new WritableImage(pixels), view, index, field);

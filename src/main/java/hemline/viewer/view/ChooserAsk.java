@@ -26,6 +26,14 @@ public final class ChooserAsk implements WindowDesk.Ask {
     }
 
     @Override
+    public Optional<Path> mapLayer(Stage owner) {
+        FileChooser chooser = new FileChooser();
+        chooser.setTitle("Add a map layer");
+        chooser.getExtensionFilters().add(new FileChooser.ExtensionFilter("GeoJSON", "*.geojson", "*.json"));
+        return Optional.ofNullable(chooser.showOpenDialog(owner)).map(File::toPath);
+    }
+
+    @Override
     public Optional<Path> pictureFile(Stage owner) {
         FileChooser chooser = new FileChooser();
         chooser.setTitle("Save the plane as a picture");

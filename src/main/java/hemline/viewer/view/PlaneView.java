@@ -75,7 +75,7 @@ final class PlaneView extends Region {
     private void watch() {
         redraw.on(model.sessionProperty(), model.shownProperty(), model.loop().indexProperty(),
                 model.plane().viewProperty(), model.plane().fieldProperty(), model.selection().trackProperty(),
-                model.selection().meetingProperty(), model.measure().fromProperty(), model.measure().toProperty());
+                model.selection().meetingProperty(), model.measure().fromProperty(), model.measure().toProperty(), model.map().linesProperty());
         for (Overlay overlay : Overlay.values()) {
             redraw.on(model.overlays().shown(overlay));
         }
@@ -118,7 +118,8 @@ final class PlaneView extends Region {
         return new PlaneScene(model.session(), model.loop().index(), model.plane().view(), shown,
                 model.selection().track(), model.selection().meeting(),
                 Stream.of(model.measure().fromProperty().get(), model.measure().toProperty().get())
-                        .filter(Objects::nonNull).toList(), letters);
+                        .filter(Objects::nonNull).toList(), model.map().linesProperty().get(),
+                letters);
     }
 
     /** Whether the picture is of the sweep, field and view wanted, rather than an earlier one stretched. */

@@ -6,6 +6,7 @@ import hemline.viewer.viewmodel.ViewerActions;
 import hemline.viewer.viewmodel.ViewerModel;
 import hemline.viewer.viewmodel.WindowPlace;
 import java.io.File;
+import java.nio.file.Path;
 import java.util.List;
 import javafx.animation.AnimationTimer;
 import javafx.geometry.Orientation;
@@ -120,11 +121,21 @@ public final class ViewerWindow {
         });
         root.setOnDragDropped(e -> {
             if (e.getDragboard().hasFiles()) {
-                model.open(e.getDragboard().getFiles().stream().map(File::toPath).toList());
+                dropped(e.getDragboard().getFiles().stream().map(File::toPath).toList());
                 e.setDropCompleted(true);
             }
             e.consume();
         });
+    }
+
+    /** Map layers are added to what is open; anything else is opened. */
+    void dropped(List<Path> paths) {
+        List<Path> maps = paths.stream().filter(p -> p.toString().endsWith(".geojson")).toList();
+        List<Path> sweeps = paths.stream().filter(p -> !maps.contains(p)).toList();
+        maps.forEach(model.map()::add);
+        if (!sweeps.isEmpty()) {
+            model.open(sweeps);
+        }
     }
 
     /** Lets the loop play and the data age. */

@@ -19,6 +19,8 @@ public final class WindowDesk implements Desk {
 
         Optional<Path> folder(Stage owner);
 
+        Optional<Path> mapLayer(Stage owner);
+
         Optional<Path> pictureFile(Stage owner);
     }
 
@@ -39,6 +41,11 @@ public final class WindowDesk implements Desk {
     @Override
     public void chooseFolder() {
         ask.folder(window.stage()).ifPresent(folder -> model.open(List.of(folder)));
+    }
+
+    @Override
+    public void chooseMapLayer() {
+        ask.mapLayer(window.stage()).ifPresent(model.map()::add);
     }
 
     @Override

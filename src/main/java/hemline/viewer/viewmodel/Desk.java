@@ -6,6 +6,8 @@ public interface Desk {
 
     void chooseFolder();
 
+    void chooseMapLayer();
+
     void copyPicture();
 
     void savePicture();

@@ -80,6 +80,11 @@ public final class JobModel {
         }
     }
 
+    /** Says why something failed, in whole words. */
+    void say(String why) {
+        trouble.set(why);
+    }
+
     /** Something short that may fail. */
     @FunctionalInterface
     public interface Attempt {

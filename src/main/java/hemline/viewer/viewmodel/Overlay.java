@@ -12,6 +12,7 @@ public enum Overlay {
     RINGS("Range rings", "Distance from the radar, km", "G", true),
     AZIMUTHS("Azimuth ticks", "Degrees clockwise from north", "Z", true),
     CEILING("Height ceiling", "Beyond this range the beam is too high: nothing is claimed", "H", true),
+    MAP("Coasts and borders", BaseMap.ATTRIBUTION + "; and your own map layers", "P", true),
     GRATICULE("Latitude and longitude", "Graticule on WGS 84, degrees", "T", false);
 
     private final String words;

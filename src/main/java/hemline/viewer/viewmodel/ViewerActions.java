@@ -152,6 +152,8 @@ public final class ViewerActions {
                     "Show or hide: " + overlay.words().toLowerCase(Locale.ROOT), model.overlays().shown(overlay),
                     overlay.key());
         }
+        add("map-layer", "Add a map layer from a GeoJSON file\u2026", open, desk::chooseMapLayer, "Shortcut+M");
+        add("map-layers-clear", "Take your own map layers away", open, model.map()::clearLayers);
         add("overlays-reset", "Show the usual overlays", always, model.overlays()::reset);
     }
 

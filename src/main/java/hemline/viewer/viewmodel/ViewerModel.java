@@ -41,6 +41,7 @@ public final class ViewerModel {
     private final LedgerModel ledger = new LedgerModel();
     private final MeasureModel measure = new MeasureModel();
     private final StatusModel status = new StatusModel();
+    private final MapModel map;
     private final SettingsModel settings = new SettingsModel();
     private final ReadOnlyObjectWrapper<LoopSession> session = new ReadOnlyObjectWrapper<>(this, "session");
     private final ReadOnlyObjectWrapper<HeldSweep> shown = new ReadOnlyObjectWrapper<>(this, "shown");
@@ -60,6 +61,7 @@ public final class ViewerModel {
         this.ui = ui;
         this.clock = clock;
         job = new JobModel(work, ui, System::nanoTime);
+        map = new MapModel(reading, ui, job);
         readOut = Bindings.createObjectBinding(() -> shown.get() == null || plane.cursorProperty().get() == null
                 ? Optional.empty() : Optional.of(ReadOut.at(plane.cursorProperty().get(), shown.get())),
                 shown, plane.cursorProperty());
@@ -97,6 +99,7 @@ public final class ViewerModel {
         ledger.open(opened);
         status.open(opened, clock.millis());
         if (afresh) {
+            map.open(opened.site());
             reachUnknown = true;
             selection.clear();
             measure.onProperty().set(false);
@@ -271,6 +274,10 @@ public final class ViewerModel {
 
     public StatusModel status() {
         return status;
+    }
+
+    public MapModel map() {
+        return map;
     }
 
     public SettingsModel settings() {

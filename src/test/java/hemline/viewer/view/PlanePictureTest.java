@@ -30,7 +30,8 @@ class PlanePictureTest {
         viewer = new Toolkit(new FakeOpener(FakeLoop::small), 1000, 640).open();
         Toolkit.run(() -> {
             viewer.model.settings().sidePanelProperty().set(false);
-            for (Overlay worded : new Overlay[] {Overlay.LABELS, Overlay.RINGS, Overlay.AZIMUTHS, Overlay.CEILING}) {
+            for (Overlay worded : new Overlay[] {Overlay.LABELS, Overlay.RINGS, Overlay.AZIMUTHS, Overlay.CEILING,
+                Overlay.MAP}) {
                 viewer.model.overlays().shown(worded).set(false);
             }
         });

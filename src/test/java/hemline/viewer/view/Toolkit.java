@@ -38,6 +38,7 @@ final class Toolkit implements WindowDesk.Ask, AutoCloseable {
     List<Path> files = List.of();
     Optional<Path> folder = Optional.empty();
     Optional<Path> picture = Optional.empty();
+    Optional<Path> mapLayer = Optional.empty();
     private final ExecutorService background = Executors.newFixedThreadPool(2);
 
     Toolkit(FakeOpener opener, double width, double height) throws Exception {
@@ -94,6 +95,11 @@ final class Toolkit implements WindowDesk.Ask, AutoCloseable {
     @Override
     public Optional<Path> folder(Stage owner) {
         return folder;
+    }
+
+    @Override
+    public Optional<Path> mapLayer(Stage owner) {
+        return mapLayer;
     }
 
     @Override

@@ -20,6 +20,7 @@ public final class BaseMap {
     /** To be shown wherever the base map is published. */
     public static final String ATTRIBUTION = "Made with Natural Earth; state borders: U.S. Census Bureau";
     private static final String RESOURCE = "/hemline/viewer/base-lines.bin.gz";
+    private static final int MOST_POINTS = 1_000_000;
     private static final double UNIT_DEG = 1e-4;
     private static final double KM_PER_DEG = 111.2;
 
@@ -38,13 +39,16 @@ public final class BaseMap {
              InputStream in = new BufferedInputStream(new GZIPInputStream(packed), 1 << 16)) {
             for (int kind = in.read(); kind > 0; kind = in.read()) {
                 int points = number(in);
+                if (kind > MapLine.Kind.OWN.ordinal() || points < 2 || points > MOST_POINTS) {
+                    throw new IOException(RESOURCE + " is damaged: line of kind " + kind + " with " + points + " points");
+                }
                 double[] longitude = new double[points];
                 double[] latitude = new double[points];
                 int x = 0;
                 int y = 0;
                 for (int i = 0; i < points; i++) {
-                    x += signed(number(in));
-                    y += signed(number(in));
+                    x += number(in);
+                    y += number(in);
                     longitude[i] = UNIT_DEG * x;
                     latitude[i] = UNIT_DEG * y;
                 }
@@ -92,7 +96,7 @@ public final class BaseMap {
         return new MapLine(kind, x, y);
     }
 
-    /** A variable-length integer, seven bits a byte, lowest first. */
+    /** A variable-length integer, seven bits a byte, lowest first, negative numbers folded between the positive. */
     private static int number(InputStream in) throws IOException {
         int value = 0;
         for (int shift = 0; shift < 32; shift += 7) {
@@ -102,14 +106,9 @@ public final class BaseMap {
             }
             value |= (next & 127) << shift;
             if (next < 128) {
-                return value;
+                return value >>> 1 ^ -(value & 1);
             }
         }
         throw new IOException(RESOURCE + " holds a number of more than 32 bits");
-    }
-
-    /** Undoes the folding of negative numbers between the positive ones. */
-    private static int signed(int folded) {
-        return folded >>> 1 ^ -(folded & 1);
     }
 }

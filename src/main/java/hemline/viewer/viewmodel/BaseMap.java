@@ -22,6 +22,7 @@ public final class BaseMap {
     private static final String RESOURCE = "/hemline/viewer/base-lines.bin.gz";
     private static final int MOST_POINTS = 1_000_000;
     private static final double UNIT_DEG = 1e-4;
+    private static final double LONGEST_STEP_DEG = 0.25;
     private static final double KM_PER_DEG = 111.2;
 
     private BaseMap() {
@@ -58,9 +59,36 @@ public final class BaseMap {
         return lines;
     }
 
-    /** Adds the stretches of a line that lie near the radar, each with one point beyond at either end. */
-    static void take(List<MapLine> into, MapLine.Kind kind, LocalPlane plane, double[] latitude, double[] longitude,
+    /**
+     * Adds the stretches of a line that lie near the radar, each with one point beyond at either end. Between its
+     * points a line is straight in longitude and latitude (RFC 7946, section 3.1.1), so a long step is divided.
+     */
+    static void take(List<MapLine> into, MapLine.Kind kind, LocalPlane plane, double[] latitudes, double[] longitudes,
                      double reachKm) {
+        int[] parts = new int[latitudes.length];
+        int points = 1;
+        for (int i = 1; i < latitudes.length; i++) {
+            double step = Math.max(Math.abs(latitudes[i] - latitudes[i - 1]), Math.abs(longitudes[i] - longitudes[i - 1]));
+            parts[i] = (int) Math.max(1, Math.ceil(step / LONGEST_STEP_DEG));
+            points += parts[i];
+        }
+        double[] latitude = new double[points];
+        double[] longitude = new double[points];
+        latitude[0] = latitudes[0];
+        longitude[0] = longitudes[0];
+        int filled = 1;
+        for (int i = 1; i < latitudes.length; i++) {
+            for (int part = 1; part <= parts[i]; part++) {
+                double share = (double) part / parts[i];
+                latitude[filled] = latitudes[i - 1] + share * (latitudes[i] - latitudes[i - 1]);
+                longitude[filled++] = longitudes[i - 1] + share * (longitudes[i] - longitudes[i - 1]);
+            }
+        }
+        takeNear(into, kind, plane, latitude, longitude, reachKm);
+    }
+
+    private static void takeNear(List<MapLine> into, MapLine.Kind kind, LocalPlane plane, double[] latitude,
+                                 double[] longitude, double reachKm) {
         int start = -1;
         for (int i = 0; i <= latitude.length; i++) {
             boolean near = i < latitude.length && isNear(plane.centre(), latitude[i], longitude[i], reachKm);

@@ -30,6 +30,9 @@ class PlanePictureTest {
         viewer = new Toolkit(new FakeOpener(FakeLoop::small), 1000, 640).open();
         Toolkit.run(() -> {
             viewer.model.settings().sidePanelProperty().set(false);
+            PlaneView plane = (PlaneView) viewer.stage.getScene().lookup("#plane");
+            plane.setMinSize(640, 400);
+            plane.setMaxSize(640, 400);
             for (Overlay worded : new Overlay[] {Overlay.LABELS, Overlay.RINGS, Overlay.AZIMUTHS, Overlay.CEILING,
                 Overlay.MAP}) {
                 viewer.model.overlays().shown(worded).set(false);

@@ -65,9 +65,16 @@ class BaseMapTest {
     @Test
     void onlyStretchesNearTheRadarAreTaken() {
         List<MapLine> taken = new ArrayList<>();
-        double[] longitude = {-30, -20, -1, 0, 1, 20, 30, 1};
-        double[] latitude = new double[8];
-        BaseMap.take(taken, MapLine.Kind.OWN, new LocalPlane(new GeoPoint(0, 0)), latitude, longitude, 300);
-        assertThat(taken).extracting(MapLine::points).containsExactly(5, 2);
+        double[] longitude = {-2, -1.8, -0.2, 0, 0.2, 1.8, 2, 1.8, 0.1};
+        BaseMap.take(taken, MapLine.Kind.OWN, new LocalPlane(new GeoPoint(0, 0)), new double[9], longitude, 60);
+        // Near is within 0.54 degrees; long steps are divided into quarters of a degree at most.
+        assertThat(taken).hasSize(2).allSatisfy(line -> {
+            assertThat(Math.abs(line.xKm(0))).isLessThan(60 + 28);
+            for (int i = 1; i < line.points(); i++) {
+                assertThat(Math.abs(line.xKm(i) - line.xKm(i - 1))).isLessThan(28);
+            }
+        });
+        assertThat(taken.get(0).xKm(0)).isLessThan(-60);
+        assertThat(taken.get(0).xKm(taken.get(0).points() - 1)).isGreaterThan(60);
     }
 }

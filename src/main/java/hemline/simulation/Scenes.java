@@ -1,7 +1,6 @@
 package hemline.simulation;
 
 import hemline.simulation.catalogue.SceneCatalogue;
-import hemline.simulation.catalogue.SceneKind;
 import hemline.simulation.catalogue.SceneKit;
 import hemline.simulation.radar.RadarSpec;
 import java.util.List;
@@ -15,16 +14,27 @@ public final class Scenes {
         return SceneCatalogue.names();
     }
 
+    /** True for a kind without any boundary, roosts among them. */
+    public static boolean isNull(String name) {
+        return SceneCatalogue.named(name).group() != SceneCatalogue.Group.OUTFLOW;
+    }
+
+    /** True for a kind with animals leaving roosts and no boundary. */
+    public static boolean isRoost(String name) {
+        return SceneCatalogue.named(name).group() == SceneCatalogue.Group.ROOST;
+    }
+
     /**
      * One loop of a kind.
      *
      * @throws IllegalArgumentException when there is no such kind
      */
     public static SimulatedLoop build(String name, RadarSpec radar, long seed) {
-        SceneKind kind = SceneCatalogue.named(name);
-        int sweeps = SceneCatalogue.sweeps(name);
-        double[] starts = Simulation.sweepStartsS(radar, sweeps, seed);
+        SceneCatalogue.Entry entry = SceneCatalogue.named(name);
+        RadarSpec timed = new RadarSpec(radar.site(), radar.dish(), radar.gates(), radar.receiver(),
+                entry.timing().apply(radar.timing()));
+        double[] starts = Simulation.sweepStartsS(timed, entry.sweeps(), seed);
         double spanS = starts[starts.length - 1] - starts[0];
-        return Simulation.of(kind.build(new SceneKit(name, radar, spanS, seed)), radar, sweeps, seed);
+        return Simulation.of(entry.kind().build(new SceneKit(name, timed, spanS, seed)), timed, entry.sweeps(), seed);
     }
 }

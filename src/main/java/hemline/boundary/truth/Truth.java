@@ -57,7 +57,8 @@ public record Truth(String scene, long seed, List<TruthSweep> sweeps, List<Truth
      * @param yKm              km north of the radar
      * @param timeMs           the ray's time, ms since 1970-01-01T00:00Z
      * @param detectability    0 (hidden: rain, blockage, too high, faded) to 1 (plain); a careful eye sees it from 0.5
-     * @param peakDbz          of the line without noise, dBZ
+     * @param peakDbz          of the line's own echo as the beam takes it in, without noise and without what lies about
+     *                         it, dBZ; of the air ahead where there is no line
      * @param normalBearingDeg compass bearing it moves toward along its normal, degrees clockwise from north
      * @param speedMs          along that bearing, m s⁻¹
      */

@@ -9,8 +9,11 @@ import hemline.simulation.scene.Air;
 import hemline.simulation.scene.Clearing;
 import hemline.simulation.scene.EchoSpec;
 import hemline.simulation.scene.FaultSpec;
+import hemline.simulation.scene.Front;
 import hemline.simulation.scene.Ground;
 import hemline.simulation.scene.LineLook;
+import hemline.simulation.scene.SceneSpec;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.random.RandomGenerator;
@@ -119,13 +122,44 @@ public final class SceneKit {
         return List.of(new FaultSpec.LostRays(between(0, 0.004)), new FaultSpec.Spikes(between(0, 0.4), between(6, 16)));
     }
 
+    /** A fair scene of an afternoon. */
+    SceneSpec afternoon(Air air, List<Front> fronts, List<EchoSpec> echoes, boolean velocity) {
+        return scene(between(14, 18.5), air, fronts, echoes, List.of(), velocity);
+    }
+
+    SceneSpec scene(double localHour, Air air, List<Front> fronts, List<EchoSpec> echoes, List<FaultSpec> faults,
+                    boolean velocity) {
+        return sceneInWind(localHour, velocity(1, 7), air, fronts, echoes, faults, velocity);
+    }
+
+    SceneSpec sceneInWind(double localHour, Point windMs, Air air, List<Front> fronts, List<EchoSpec> echoes,
+                          List<FaultSpec> faults, boolean velocity) {
+        List<FaultSpec> all = new ArrayList<>(faults);
+        all.addAll(everydayFaults());
+        return on(startMs(localHour), windMs, air, fronts, echoes, all, velocity);
+    }
+
+    SceneSpec on(long startMs, Point windMs, Air air, List<Front> fronts, List<EchoSpec> echoes, List<FaultSpec> faults,
+                 boolean velocity) {
+        return new SceneSpec(name, startMs, windMs, air, fronts, echoes, faults, velocity);
+    }
+
     /** Start of the scene at a local solar hour of a summer's day, ms since 1970-01-01T00:00Z. */
     long startMs(double localHour) {
+        return startMs(summerDay(), localHour);
+    }
+
+    long startMs(LocalDate day, double localHour) {
         double longitude = radar.site().position().orElseThrow().longitudeDeg();
+        return day.toEpochDay() * 86_400_000L + 60_000L * Math.round(60 * (localHour - longitude / 15));
+    }
+
+    LocalDate summerDay() {
         boolean north = radar.site().position().orElseThrow().latitudeDeg() >= 0;
-        long firstDay = java.time.LocalDate.of(2031, north ? 6 : 12, 1).toEpochDay();
-        long day = firstDay + (long) between(0, 80);
-        double hours = localHour - longitude / 15;
-        return day * 86_400_000L + 60_000L * Math.round(60 * hours);
+        return LocalDate.of(2031, north ? 6 : 12, 1).plusDays((long) between(0, 80));
+    }
+
+    SunTime sun(LocalDate day) {
+        return new SunTime(radar.site().position().orElseThrow().latitudeDeg(), day.getDayOfYear());
     }
 }

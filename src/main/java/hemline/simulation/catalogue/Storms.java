@@ -34,6 +34,20 @@ final class Storms {
                 kit.between(1, 2), kit.between(0, 180), kit.number());
     }
 
+    /** Showers strewn over the area, all moving with one wind, coming and going at all times. */
+    static List<EchoSpec> scattered(SceneKit kit, int count, Point driftMs, double fromDbz, double toDbz) {
+        List<EchoSpec> cells = new ArrayList<>();
+        for (int i = 0; i < count; i++) {
+            double birth = kit.between(-2400, kit.spanS);
+            Point place = kit.velocity(10, 1.1 * kit.reachKm).minus(driftMs.times(0.9));
+            double rise = kit.between(700, 1500);
+            Life life = new Life(birth, rise, birth + rise + kit.between(600, 1800), kit.between(1200, 2400));
+            cells.add(new Cell(place, driftMs.plus(kit.velocity(0, 1)), life, kit.between(fromDbz, toDbz), kit.between(2.5, 6),
+                    kit.between(1, 2.6), kit.between(0, 180), kit.number()));
+        }
+        return cells;
+    }
+
     /** Cells strung along a line that trails a front. */
     static List<EchoSpec> line(SceneKit kit, Point middleKm, double alongDeg, double lengthKm, Point driftMs,
                                double fromS, double toS) {

@@ -1,10 +1,14 @@
 package hemline.simulation.echo;
 
 import hemline.simulation.random.Streams;
+import hemline.simulation.scene.Band;
 import hemline.simulation.scene.Cell;
 import hemline.simulation.scene.EchoSpec;
 import hemline.simulation.scene.Ground;
+import hemline.simulation.scene.Masts;
+import hemline.simulation.scene.Roost;
 import hemline.simulation.scene.SceneSpec;
+import hemline.simulation.scene.Sheet;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -22,6 +26,18 @@ public final class SceneEchoes {
     private static EchoLayer layerOf(EchoSpec spec, Streams streams) {
         if (spec instanceof Cell cell) {
             return new CellLayer(cell, streams);
+        }
+        if (spec instanceof Sheet sheet) {
+            return new SheetLayer(sheet, streams);
+        }
+        if (spec instanceof Band band) {
+            return new BandLayer(band, streams);
+        }
+        if (spec instanceof Roost roost) {
+            return new RoostLayer(roost, streams);
+        }
+        if (spec instanceof Masts masts) {
+            return new MastLayer(masts, streams);
         }
         return new GroundLayer((Ground) spec, streams);
     }

@@ -76,13 +76,9 @@ final class Contacts {
         CurvePoint onB = fronts.fronts().get(b).curve().at(now.station(b), high);
         double cos = onA.normal().dot(onB.normal());
         double angle = Math.toDegrees(org.apache.commons.math3.util.FastMath.acos(Math.min(1, Math.abs(cos))));
-        return new Contact(high, at.place, angle, closing(a, b, high, side));
-    }
-
-    private double closing(int a, int b, double timeS, int side) {
-        Gap early = gap(a, b, timeS - 10, side);
-        Gap late = gap(a, b, timeS, side);
-        return early == null || late == null ? Double.NaN : (early.km - late.km) * 1000 / 10;
+        // How fast B's line and A's point close along B's normal.
+        double closing = Math.abs(onB.normalMs() - onA.normalMs() * cos);
+        return new Contact(high, at.place, angle, closing);
     }
 
     private Gap gap(int a, int b, double timeS, int side) {

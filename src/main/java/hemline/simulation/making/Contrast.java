@@ -41,15 +41,16 @@ final class Contrast {
         lost = clean.lost[rayOf(place)];
         double crest = Double.NEGATIVE_INFINITY;
         lineDb = 0;
-        crestDbz = Double.NEGATIVE_INFINITY;
+        double line = 0;
         for (double d = -CREST_KM; d <= CREST_KM; d += STEP_KM) {
             int gate = index(place.plus(normal.times(d)));
             if (gate >= 0) {
                 crest = Math.max(crest, level(clean.total, gate));
                 lineDb = Math.max(lineDb, level(clean.total, gate) - level(clean.withoutLines, gate));
-                crestDbz = Math.max(crestDbz, Decibels.fromLinear(Math.max(1e-9, clean.total[gate])));
+                line = Math.max(line, clean.total[gate] - clean.withoutLines[gate]);
             }
         }
+        crestDbz = line > 0 ? Decibels.fromLinear(line) : mean(place, normal, clean.total, 0.5, 3);
         double ahead = lowest(place, normal, 1);
         double behind = lowest(place, normal, -1);
         prominenceDb = crest - Math.max(ahead, behind);

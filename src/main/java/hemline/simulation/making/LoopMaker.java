@@ -79,7 +79,9 @@ public final class LoopMaker {
                 boundaries.add(new TruthBoundary(spec.id(), spec.form(), spec.outflow(), lines, arcs(spec, lines, times)));
             }
         }
-        return new Truth(scene.name(), seed, times, boundaries, List.of(), meetings(boundaries, times));
+        List<Sweep> sweepsMade = made.stream().map(Made::sweep).toList();
+        return new Truth(scene.name(), seed, times, boundaries, new DecoyMaker(scene, radar).decoys(sweepsMade),
+                meetings(boundaries, times));
     }
 
     private List<TruthArc> arcs(Front front, List<TruthLine> lines, List<TruthSweep> times) {

@@ -16,6 +16,7 @@ public final class RangeGrid {
     private final double[] spreadKm;
     private final double antennaKm;
     private final Map<Double, double[]> shares = new ConcurrentHashMap<>();
+    private final Map<Double, double[]> below = new ConcurrentHashMap<>();
 
     public RangeGrid(RadarSpec radar) {
         partsPerGate = (int) Math.ceil(radar.gates().spacingM() / FINEST_M - 1e-9);
@@ -85,6 +86,17 @@ public final class RangeGrid {
             double[] share = new double[bins()];
             for (int i = 0; i < share.length; i++) {
                 share[i] = layerShare(i, 0, depth);
+            }
+            return share;
+        });
+    }
+
+    /** Share of the two-way beam below a height above the ground, km, for each bin. Shared; must not be changed. */
+    public double[] layerShareBelow(double heightKm) {
+        return below.computeIfAbsent(heightKm, height -> {
+            double[] share = new double[bins()];
+            for (int i = 0; i < share.length; i++) {
+                share[i] = layerShare(i, aboveGroundKm(i) - 12 * spreadKm[i] - 1, height);
             }
             return share;
         });

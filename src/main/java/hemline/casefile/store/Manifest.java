@@ -76,6 +76,10 @@ record Manifest(String format, int version, String program, ObjectNode settings,
                 throw new CaseFileException(file, 0, "it has version " + tree.path("version").asInt()
                         + ", but this program knows up to version " + VERSION, "Open it with a newer program");
             }
+            if (!tree.isObject()) {
+                throw new CaseFileException(file, 0, "it is not the head of a case: a JSON object is due",
+                        "Restore it from a copy of the case");
+            }
             return CaseJson.MAPPER.treeToValue(tree, Manifest.class);
         } catch (CaseFileException e) {
             throw e;

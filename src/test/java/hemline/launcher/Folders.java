@@ -3,6 +3,8 @@ package hemline.launcher;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -13,26 +15,23 @@ final class Folders {
     private Folders() {
     }
 
-    /** Every file below a folder with its bytes in hexadecimal and its time of change. */
+    /** Every file below a folder with the check sum of its bytes and, if asked for, its time of change. */
     static SortedMap<String, String> state(Path folder, boolean withTimes) throws IOException {
         SortedMap<String, String> state = new TreeMap<>();
         try (Stream<Path> tree = Files.walk(folder)) {
-            for (Path path : tree.toList()) {
-                String name = folder.relativize(path).toString();
-                String time = withTimes ? " " + Files.getLastModifiedTime(path) : "";
-                state.put(name, (Files.isRegularFile(path) ? HexFormat.of().formatHex(Files.readAllBytes(path)) : "")
-                        + time);
+            for (Path path : tree.filter(Files::isRegularFile).toList()) {
+                state.put(folder.relativize(path).toString(),
+                        sha256(path) + (withTimes ? " " + Files.getLastModifiedTime(path) : ""));
             }
         }
         return state;
     }
 
-    static void copy(Path from, Path to) throws IOException {
-        Files.createDirectories(to);
-        try (Stream<Path> list = Files.list(from)) {
-            for (Path path : list.filter(Files::isRegularFile).toList()) {
-                Files.copy(path, to.resolve(path.getFileName()));
-            }
+    static String sha256(Path file) throws IOException {
+        try {
+            return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(file)));
+        } catch (NoSuchAlgorithmException e) {
+            throw new IllegalStateException(e);
         }
     }
 }

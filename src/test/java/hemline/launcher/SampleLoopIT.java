@@ -17,8 +17,6 @@ import java.io.IOException;
 import java.io.Reader;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.security.MessageDigest;
-import java.util.HexFormat;
 import java.util.List;
 import java.util.SortedMap;
 import javax.imageio.ImageIO;
@@ -133,12 +131,12 @@ class SampleLoopIT {
         int read = 0;
         for (JsonNode input : record.get("inputs")) {
             assertThat(input.get("sha256").asText())
-                    .isEqualTo(sha256(Launched.BASE.resolve(input.get("path").asText())));
+                    .isEqualTo(Folders.sha256(Launched.BASE.resolve(input.get("path").asText())));
             read += input.get("fate").asText().equals("read") ? 1 : 0;
         }
         assertThat(read).isGreaterThanOrEqualTo(14).isEqualTo(record.get("counts").get("sweeps").asInt());
         for (JsonNode result : record.get("results")) {
-            assertThat(result.get("sha256").asText()).isEqualTo(sha256(results.resolve(result.get("name").asText())));
+            assertThat(result.get("sha256").asText()).isEqualTo(Folders.sha256(results.resolve(result.get("name").asText())));
         }
         assertThat(record.get("results").findValuesAsText("name")).contains("boundaries.csv", "tracks.csv",
                 "meetings.csv", "boundaries.geojson", "summary.html", "overview.png", "pictures/sweep-000.png");
@@ -168,9 +166,5 @@ class SampleLoopIT {
         assertThat(table.out()).contains("recall of detectable length", "precision of found length");
         Launched json = Launched.of("score", results, "--truth", truth, "--json");
         assertThat(new ObjectMapper().readTree(json.out()).isObject()).isTrue();
-    }
-
-    private static String sha256(Path file) throws Exception {
-        return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(file)));
     }
 }

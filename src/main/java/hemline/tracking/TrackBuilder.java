@@ -14,7 +14,8 @@ import java.util.List;
 
 /** Pieces of a group to strands, neighbours on a curve rejoined; and strands to the stretches of a track. */
 final class TrackBuilder {
-    private static final double MOST_SPACING_KM = 1;
+    /** Just under 1 km, so that it still holds when tables round places to the metre. */
+    private static final double MOST_SPACING_KM = 0.998;
 
     private final VertexCloud cloud;
     private final MotionLattice.Motion motion;

@@ -2,6 +2,8 @@ package hemline.viewer.view;
 
 import java.awt.image.BufferedImage;
 import java.io.IOException;
+import java.io.OutputStream;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import javafx.embed.swing.SwingFXUtils;
 import javafx.scene.Node;
@@ -29,8 +31,11 @@ final class Pictures {
     /** Writes a PNG; an existing file is replaced. */
     static void save(Node node, Path file) throws IOException {
         BufferedImage image = SwingFXUtils.fromFXImage(of(node), null);
-        if (!ImageIO.write(image, "png", file.toFile())) {
-            throw new IOException("this Java runtime cannot write PNG files");
+        // Given a file, ImageIO would also print its failure to standard error.
+        try (OutputStream out = Files.newOutputStream(file)) {
+            if (!ImageIO.write(image, "png", out)) {
+                throw new IOException("this Java runtime cannot write PNG files");
+            }
         }
     }
 }

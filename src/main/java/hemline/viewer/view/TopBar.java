@@ -34,6 +34,7 @@ final class TopBar extends HBox {
         HBox.setHgrow(title, Priority.ALWAYS);
         title.setMaxWidth(Double.MAX_VALUE);
         HBox fields = new HBox();
+        fields.setAlignment(Pos.CENTER);
         for (PlaneField field : PlaneField.values()) {
             ToggleButton button = Buttons.toggle(actions.get("field-" + field.name().toLowerCase(Locale.ROOT)),
                     field.words());

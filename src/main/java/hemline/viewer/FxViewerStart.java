@@ -22,7 +22,8 @@ public final class FxViewerStart implements ViewerStart {
         CountDownLatch closed = new CountDownLatch(1);
         AtomicReference<RuntimeException> failure = new AtomicReference<>();
         ExecutorService work = daemons("hemline-open", 1);
-        ExecutorService draw = daemons("hemline-draw", Math.max(1, Math.min(3, Runtime.getRuntime().availableProcessors() - 1)));
+        ExecutorService draw = daemons("hemline-draw", Math.max(1, Math.min(3,
+                Runtime.getRuntime().availableProcessors() - 1)));
         Platform.startup(() -> {
             try {
                 show(request, work, draw, closed);
@@ -51,7 +52,8 @@ public final class FxViewerStart implements ViewerStart {
                 System.getProperty("user.home"), System.getProperty(SettingsPlace.OVERRIDE)), model);
         model.job().attempt("Reading the settings", keeper::load);
         Stage stage = new Stage();
-        ViewerWindow window = new ViewerWindow(stage, model, new RasterFeed(draw, Platform::runLater), new ChooserAsk());
+        ViewerWindow window = new ViewerWindow(stage, model, new RasterFeed(draw, Platform::runLater),
+                new ChooserAsk());
         stage.setOnHiding(e -> {
             window.closing();
             model.job().attempt("Keeping the settings", keeper::save);

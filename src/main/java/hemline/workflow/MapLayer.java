@@ -36,7 +36,8 @@ public record MapLayer(String name, List<List<GeoPoint>> lines) {
         try {
             collect(file, new ObjectMapper().readTree(file.toFile()), lines);
         } catch (JsonProcessingException e) {
-            throw new IOException(file + ": not JSON at line " + (e.getLocation() == null ? 1 : e.getLocation().getLineNr())
+            throw new IOException(file + ": not JSON at line " + (e.getLocation() == null ? 1
+                    : e.getLocation().getLineNr())
                     + ": " + e.getOriginalMessage() + "; export the map as GeoJSON", e);
         }
         if (lines.isEmpty()) {

@@ -42,7 +42,8 @@ public final class FakeLoop implements LoopSession {
     private final int rays;
     private final int gates;
     private final boolean analysed;
-    private final RadarSite site = new RadarSite("Marrow Flat (invented)", Optional.of(new GeoPoint(38.5, -101.25)), 1050);
+    private final RadarSite site = new RadarSite("Marrow Flat (invented)", Optional.of(new GeoPoint(38.5, -101.25)),
+            1050);
     private final List<SweepFrame> frames = new ArrayList<>();
     private final List<Track> tracks;
 
@@ -116,7 +117,8 @@ public final class FakeLoop implements LoopSession {
 
     private TrackVertex vertex(int sweep, Point at, double bearing, double speedMs, boolean seen) {
         SweepFrame frame = frames.get(sweep);
-        return new TrackVertex(at, frame.timeAtMs(at), 12, frame.beamHeightM(at), bearing, new Speed(speedMs, 0.9), seen);
+        return new TrackVertex(at, frame.timeAtMs(at), 12, frame.beamHeightM(at), bearing, new Speed(speedMs, 0.9),
+                seen);
     }
 
     @Override
@@ -136,7 +138,8 @@ public final class FakeLoop implements LoopSession {
             }
         }
         return new Sweep(site, "invented sweep " + (index + 1), 0.5, 1, GATE_M / 2, GATE_M, frames.get(index).rays(),
-                new Field("DBZH", "dBZ", rays, gates, dbz), Optional.of(new Field("VRADH", "m s-1", rays, gates, velocity)),
+                new Field("DBZH", "dBZ", rays, gates, dbz), Optional.of(new Field("VRADH", "m s-1", rays, gates,
+                        velocity)),
                 24);
     }
 

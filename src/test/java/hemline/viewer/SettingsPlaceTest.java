@@ -26,6 +26,7 @@ class SettingsPlaceTest {
 
     @Test
     void canBeOverridden() {
-        assertThat(SettingsPlace.file(Map.of(), "Linux", "/home/u", "/desk/3.properties")).isEqualTo(Path.of("/desk/3.properties"));
+        assertThat(SettingsPlace.file(Map.of(), "Linux", "/home/u",
+                "/desk/3.properties")).isEqualTo(Path.of("/desk/3.properties"));
     }
 }

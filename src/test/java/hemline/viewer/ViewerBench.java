@@ -31,7 +31,8 @@ public final class ViewerBench {
 
     public static void main(String[] args) throws Exception {
         long launched = System.nanoTime();
-        ExecutorService draw = Executors.newFixedThreadPool(Math.max(1, Runtime.getRuntime().availableProcessors() - 1));
+        ExecutorService draw = Executors.newFixedThreadPool(Math.max(1,
+                Runtime.getRuntime().availableProcessors() - 1));
         CountDownLatch done = new CountDownLatch(1);
         Platform.startup(() -> {
             FakeOpener opener = new FakeOpener(analysed -> new FakeLoop(16, 720, 1000, analysed));
@@ -45,7 +46,8 @@ public final class ViewerBench {
             stage.show();
             feed.rasterProperty().addListener((o, was, now) -> {
                 if (was == null) {
-                    System.out.printf(Locale.ROOT, "first picture after %.0f ms%n", (System.nanoTime() - launched) / 1e6);
+                    System.out.printf(Locale.ROOT, "first picture after %.0f ms%n",
+                            (System.nanoTime() - launched) / 1e6);
                 }
             });
             model.open(List.of(Path.of("invented")));
@@ -95,7 +97,8 @@ public final class ViewerBench {
                     stop();
                     cpuMs(cpuMs, 1);
                     Arrays.sort(frameMs);
-                    System.out.printf(Locale.ROOT, "%-6s median %.1f ms, p90 %.1f ms, largest %.1f ms (%.0f frames/s); processor"
+                    System.out.printf(Locale.ROOT,
+                            "%-6s median %.1f ms, p90 %.1f ms, largest %.1f ms (%.0f frames/s); processor"
                             + " time a frame: user's thread %.1f ms, renderer %.1f ms, background %.1f ms%n",
                             name, frameMs[FRAMES / 2], frameMs[FRAMES * 9 / 10], frameMs[FRAMES - 1],
                             1000 / (Arrays.stream(frameMs).sum() / FRAMES), cpuMs[0] / FRAMES, cpuMs[1] / FRAMES,

@@ -45,7 +45,8 @@ record Backdrop(List<Ring> rings, List<MapLine> map) {
         double halfDiagonal = Math.hypot(view.widthPx(), view.heightPx()) / 2 / view.pxPerKm();
         double away = view.centre().lengthKm();
         double step = stepKm(view);
-        return NiceSteps.multiples(Math.max(step, away - halfDiagonal), Math.min(FARTHEST_KM, away + halfDiagonal), step);
+        return NiceSteps.multiples(Math.max(step, away - halfDiagonal), Math.min(FARTHEST_KM, away + halfDiagonal),
+                step);
     }
 
     static double ceilingKm(PlaneScene scene) {

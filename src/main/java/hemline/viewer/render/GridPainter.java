@@ -67,7 +67,8 @@ final class GridPainter {
             double y = y0 - reach * way.yKm();
             g.strokeLine(x, y, x - 7 * way.xKm(), y + 7 * way.yKm());
             double half = 17 * letters.scale();
-            letters.plate(g, Words.bearing(bearing), Math.max(half, Math.min(view.widthPx() - half, x - 20 * way.xKm())),
+            letters.plate(g, Words.bearing(bearing), Math.max(half, Math.min(view.widthPx() - half,
+                    x - 20 * way.xKm())),
                     Math.max(9, Math.min(view.heightPx() - 9, y + 16 * way.yKm())), Inks.GRID_TEXT);
         }
     }

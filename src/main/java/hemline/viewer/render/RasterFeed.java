@@ -121,7 +121,8 @@ public final class RasterFeed {
     }
 
     private void paint(Wish wish, LevelGrid grid, Runnable afterwards) {
-        SweepRaster drawn = SweepRaster.draw(grid, mapFor(wish.view(), wish.scale()), wish.backdrop(), wish.view(), wish.index(),
+        SweepRaster drawn = SweepRaster.draw(grid, mapFor(wish.view(), wish.scale()), wish.backdrop(), wish.view(),
+                wish.index(),
                 wish.field());
         ui.execute(() -> {
             kept.put(wish, drawn);

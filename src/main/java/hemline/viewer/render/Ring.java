@@ -18,7 +18,8 @@ public record Ring(double radiusKm, int argb, double dashPx) {
         if (!(r > 1)) {
             return;
         }
-        // Where the circle runs more across than down, each column is crossed once above and once below; elsewhere rows.
+        // Where the circle runs more across than down, each column is crossed once above and once below; elsewhere
+        // rows.
         double half = r * Math.sqrt(0.5);
         for (int column = from(x - half); column <= Math.min(pen.width() - 1, x + half); column++) {
             double across = column + 0.5 - x;

@@ -27,7 +27,8 @@ final class KeyMap {
                 }
                 Action before = keys.put(combination, action);
                 if (before != null) {
-                    throw new IllegalArgumentException("key " + key + " is given to " + before.id() + " and " + action.id());
+                    throw new IllegalArgumentException("key " + key + " is given to " + before.id() + " and "
+                            + action.id());
                 }
             }
         }
@@ -39,8 +40,9 @@ final class KeyMap {
                     && !event.isAltDown() && !event.getCode().isFunctionKey() && event.getCode() != KeyCode.ESCAPE;
             if (!typing) {
                 keys.entrySet().stream().filter(entry -> entry.getKey().match(event)).findFirst().ifPresent(entry -> {
-                    entry.getValue().perform();
-                    event.consume();
+                    if (entry.getValue().perform()) {
+                        event.consume();
+                    }
                 });
             }
         });

@@ -93,7 +93,8 @@ final class LedgerTable<R> {
     private Comparator<R> order() {
         Comparator<R> order = null;
         for (TableColumn<R, ?> column : table.getSortOrder()) {
-            Comparator<R> next = columns.get(indexOf(column)).order(column.getSortType() == TableColumn.SortType.DESCENDING);
+            boolean descending = column.getSortType() == TableColumn.SortType.DESCENDING;
+            Comparator<R> next = columns.get(indexOf(column)).order(descending);
             order = order == null ? next : order.thenComparing(next);
         }
         return order;

@@ -67,7 +67,8 @@ final class PlaneView extends Region {
         widthProperty().addListener((o, was, now) -> resized());
         heightProperty().addListener((o, was, now) -> resized());
         model.loop().indexProperty().addListener((o, was, now) ->
-                direction = now.intValue() < was.intValue() && model.loop().motionProperty().get() != Motion.FORWARD ? -1 : 1);
+                direction = now.intValue() < was.intValue() && model.loop().motionProperty().get() != Motion.FORWARD
+                        ? -1 : 1);
         watch();
         mouse();
     }
@@ -75,7 +76,8 @@ final class PlaneView extends Region {
     private void watch() {
         redraw.on(model.sessionProperty(), model.shownProperty(), model.loop().indexProperty(),
                 model.plane().viewProperty(), model.plane().fieldProperty(), model.selection().trackProperty(),
-                model.selection().meetingProperty(), model.measure().fromProperty(), model.measure().toProperty(), model.map().linesProperty());
+                model.selection().meetingProperty(), model.measure().fromProperty(), model.measure().toProperty(),
+                        model.map().linesProperty());
         for (Overlay overlay : Overlay.values()) {
             redraw.on(model.overlays().shown(overlay));
         }
@@ -99,7 +101,8 @@ final class PlaneView extends Region {
         if (model.session() == null || getWidth() < 1 || getHeight() < 1) {
             return;
         }
-        double scale = getScene() == null || getScene().getWindow() == null ? 1 : getScene().getWindow().getOutputScaleX();
+        double scale = getScene() == null || getScene().getWindow() == null ? 1
+                : getScene().getWindow().getOutputScaleX();
         PlaneScene scene = scene();
         feed.want(model.store(), scene, model.plane().fieldProperty().get(), direction, scale);
         placeSweep();

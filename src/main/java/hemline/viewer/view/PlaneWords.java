@@ -16,7 +16,8 @@ final class PlaneWords {
             return "Plane: no loop is open";
         }
         int index = model.loop().index();
-        long here = session.tracks().stream().filter(t -> t.pieces().stream().anyMatch(p -> p.sweep() == index)).count();
+        long here = session.tracks().stream().filter(t -> t.pieces().stream().anyMatch(p ->
+                p.sweep() == index)).count();
         StringBuilder words = new StringBuilder("Plane: sweep ").append(index + 1).append(" of ")
                 .append(session.frames().size()).append(", ")
                 .append(Words.clock(session.frames().get(index).meanTimeMs())).append(" UTC, ").append(here)

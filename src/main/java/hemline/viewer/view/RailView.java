@@ -15,6 +15,9 @@ final class RailView extends CanvasRegion {
     private final ViewerModel model;
     private final RailPainter painter = new RailPainter();
     private RailLayout layout;
+    private LoopSession laidOut;
+    private double laidWidth;
+    private double laidHeight;
 
     RailView(ViewerModel model) {
         super(model.settings());
@@ -83,7 +86,12 @@ final class RailView extends CanvasRegion {
             g.fillRect(0, 0, getWidth(), getHeight());
             return;
         }
-        layout = RailLayout.of(session, getWidth(), getHeight());
+        if (layout == null || session != laidOut || getWidth() != laidWidth || getHeight() != laidHeight) {
+            layout = RailLayout.of(session, getWidth(), getHeight());
+            laidOut = session;
+            laidWidth = getWidth();
+            laidHeight = getHeight();
+        }
         painter.paint(canvas().getGraphicsContext2D(), layout, new RailPainter.State(model.loop().index(),
                 model.loop().firstProperty().get(), model.loop().lastProperty().get(), model.selection().track(),
                 model.selection().meeting(), session.tracks()), chrome, getWidth(), getHeight());

@@ -30,7 +30,8 @@ final class TopBar extends HBox {
         Label title = new Label("No loop is open");
         title.setId("title");
         title.getStyleClass().add("loop-title");
-        model.sessionProperty().addListener((o, was, now) -> title.setText(now == null ? "No loop is open" : now.title()));
+        model.sessionProperty().addListener((o, was, now) -> title.setText(now == null ? "No loop is open"
+                : now.title()));
         HBox.setHgrow(title, Priority.ALWAYS);
         title.setMaxWidth(Double.MAX_VALUE);
         HBox fields = new HBox();

@@ -8,12 +8,14 @@ import hemline.viewer.viewmodel.Trace;
 import hemline.viewer.viewmodel.ViewerModel;
 import java.util.Optional;
 import javafx.scene.AccessibleRole;
+import javafx.scene.control.Tooltip;
 
 /** One trace of the selected track; hover reads it out, a click goes to that sweep. */
 final class TraceView extends CanvasRegion {
     private final ViewerModel model;
     private final boolean timed;
     private final TracePainter painter = new TracePainter();
+    private final Tooltip about = new Tooltip();
     private Track track;
     private Trace trace;
     private Optional<Trace.Sample> hovered = Optional.empty();
@@ -23,6 +25,7 @@ final class TraceView extends CanvasRegion {
         super(model.settings());
         this.timed = timed;
         this.model = model;
+        Tooltip.install(this, about);
         setMinHeight(timed ? 55 : 46);
         setPrefHeight(timed ? 99 : 88);
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
@@ -41,8 +44,9 @@ final class TraceView extends CanvasRegion {
         hovered = Optional.empty();
         setId("trace-" + trace.name().toLowerCase(java.util.Locale.ROOT).replace(' ', '-'));
         setAccessibleText(trace.name() + " of " + track.id() + ": " + (trace.samples().isEmpty() ? trace.none()
-                : trace.words(trace.samples().get(0)) + " to " + trace.words(trace.samples().get(trace.samples().size() - 1))));
-        javafx.scene.control.Tooltip.install(this, new javafx.scene.control.Tooltip(trace.about()));
+                : trace.words(trace.samples().get(0)) + " to "
+                        + trace.words(trace.samples().get(trace.samples().size() - 1))));
+        about.setText(trace.about());
         redraw().request();
     }
 

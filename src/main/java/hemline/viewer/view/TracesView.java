@@ -50,7 +50,8 @@ final class TracesView extends StackPane {
 
     private void show(Track track) {
         String arc = track.arc().map(a -> ", expanding " + Words.speed(a.expansion())).orElse("");
-        heading.setText(track.id() + " toward " + Words.bearing(track.bearingDeg()) + " at " + Words.speed(track.speed())
+        heading.setText(track.id() + " toward " + Words.bearing(track.bearingDeg()) + " at "
+                + Words.speed(track.speed())
                 + arc + "  (\u00b1 2 sd)");
         List<Trace> traces = Traces.of(track);
         for (int i = 0; i < views.size(); i++) {

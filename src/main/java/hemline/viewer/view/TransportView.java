@@ -54,7 +54,8 @@ final class TransportView extends VBox {
         FontIcon icon = (FontIcon) button.getGraphic();
         Feather still = (Feather) icon.getIconCode();
         icon.setScaleX(mirrored ? -1 : 1);
-        model.loop().motionProperty().addListener((o, was, now) -> icon.setIconCode(now == motion ? Feather.PAUSE : still));
+        model.loop().motionProperty().addListener((o, was, now) -> icon.setIconCode(now == motion ? Feather.PAUSE
+                : still));
         return button;
     }
 

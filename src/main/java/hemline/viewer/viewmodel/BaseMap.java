@@ -41,7 +41,8 @@ public final class BaseMap {
             for (int kind = in.read(); kind > 0; kind = in.read()) {
                 int points = number(in);
                 if (kind > MapLine.Kind.OWN.ordinal() || points < 2 || points > MOST_POINTS) {
-                    throw new IOException(RESOURCE + " is damaged: line of kind " + kind + " with " + points + " points");
+                    throw new IOException(RESOURCE + " is damaged: line of kind " + kind + " with " + points
+                            + " points");
                 }
                 double[] longitude = new double[points];
                 double[] latitude = new double[points];
@@ -68,7 +69,8 @@ public final class BaseMap {
         int[] parts = new int[latitudes.length];
         int points = 1;
         for (int i = 1; i < latitudes.length; i++) {
-            double step = Math.max(Math.abs(latitudes[i] - latitudes[i - 1]), Math.abs(longitudes[i] - longitudes[i - 1]));
+            double step = Math.max(Math.abs(latitudes[i] - latitudes[i - 1]),
+                    Math.abs(longitudes[i] - longitudes[i - 1]));
             parts[i] = (int) Math.max(1, Math.ceil(step / LONGEST_STEP_DEG));
             points += parts[i];
         }

@@ -139,7 +139,8 @@ public final class JobModel {
             }
             double share = total > 0 ? Math.min(1, (double) done / total) : -1;
             String left = share > 0.02 && share < 1
-                    ? ", about " + Words.span(Math.round((now - stageStartNs) / 1e6 * (1 - share) / share)) + " left" : "";
+                    ? ", about " + Words.span(Math.round((now - stageStartNs) / 1e6 * (1 - share) / share)) + " left"
+                            : "";
             String text = newStage + (total > 0 ? " " + done + " of " + total : "") + left;
             Runnable show = () -> {
                 if (mine == cancelled && !mine.get()) {

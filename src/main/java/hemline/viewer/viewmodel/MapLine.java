@@ -16,7 +16,8 @@ public final class MapLine {
     /** Coordinates are km east and north of the radar; arrays are handed over. */
     MapLine(Kind kind, double[] xKm, double[] yKm) {
         if (xKm.length != yKm.length || xKm.length < 2) {
-            throw new IllegalArgumentException("a map line needs two points, got " + xKm.length + " x and " + yKm.length + " y");
+            throw new IllegalArgumentException("a map line needs two points, got " + xKm.length + " x and "
+                    + yKm.length + " y");
         }
         this.kind = kind;
         this.xKm = xKm;

@@ -2,13 +2,15 @@ package hemline.viewer.viewmodel;
 
 /** What can be drawn over the sweep; each can be shown or hidden. */
 public enum Overlay {
-    BOUNDARIES("Boundaries", "Lines found in this sweep: solid found, dashed drawn by hand, dotted set aside", "B", true),
+    BOUNDARIES("Boundaries", "Lines found in this sweep: solid found, dashed drawn by hand, dotted set aside", "B",
+            true),
     LABELS("Labels", "Track name and speed, m s\u207b\u00b9", "L", true),
     ARROWS("Motion, 10 min", "Arrow to where the line will be in 10 minutes; the bar at its tip spans two standard"
             + " deviations either way", "V", true),
     EARLIER("Earlier positions", "The track in earlier sweeps, fading with age", "E", true),
     ARCS("Arc fit", "The circle fitted through time and the path of its centre", "C", true),
-    MEETINGS("Meetings", "Diamond filled: observed. Diamond open: expected. Ellipse: one standard deviation", "M", true),
+    MEETINGS("Meetings", "Diamond filled: observed. Diamond open: expected. Ellipse: one standard deviation", "M",
+            true),
     RINGS("Range rings", "Distance from the radar, km", "G", true),
     AZIMUTHS("Azimuth ticks", "Degrees clockwise from north", "Z", true),
     CEILING("Height ceiling", "Beyond this range the beam is too high: nothing is claimed", "H", true),

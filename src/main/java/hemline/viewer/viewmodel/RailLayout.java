@@ -48,7 +48,8 @@ public record RailLayout(TimeScale scale, List<Double> sweepX, List<Bar> bars, L
             // An expected meeting may lie after the loop; a far one must not squeeze the sweeps.
             to = Math.max(to, Math.min(meeting.timeMs(), frames.get(frames.size() - 1).meanTimeMs() + span / 4));
         }
-        TimeScale scale = new TimeScale(from, Math.max(from + 60_000, to), SIDE_PX, Math.max(SIDE_PX + 1, width - SIDE_PX));
+        TimeScale scale = new TimeScale(from, Math.max(from + 60_000, to), SIDE_PX, Math.max(SIDE_PX + 1,
+                width - SIDE_PX));
         List<Double> ticks = frames.stream().map(f -> scale.x(f.meanTimeMs())).toList();
         List<Bar> bars = bars(session, scale, height);
         List<Mark> marks = session.meetings().stream()

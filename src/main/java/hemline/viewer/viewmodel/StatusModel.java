@@ -42,7 +42,8 @@ public final class StatusModel {
         if (ageMs < -60_000) {
             age.set(when + Words.span(ageMs) + " ahead of the clock here");
         } else {
-            age.set(when + Words.span(Math.max(0, ageMs)) + " old" + (archive ? " (archive)" : old.get() ? ": old" : ""));
+            age.set(when + Words.span(Math.max(0, ageMs)) + " old" + (archive ? " (archive)" : old.get() ? ": old"
+                    : ""));
         }
     }
 

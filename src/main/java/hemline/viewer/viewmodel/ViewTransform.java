@@ -63,7 +63,8 @@ public record ViewTransform(Point centre, double pxPerKm, double widthPx, double
     public ViewTransform zoomed(double factor, double xPx, double yPx) {
         double zoom = clampZoom(pxPerKm * factor);
         Point fixed = toPlane(xPx, yPx);
-        Point newCentre = new Point(fixed.xKm() - (xPx - widthPx / 2) / zoom, fixed.yKm() + (yPx - heightPx / 2) / zoom);
+        Point newCentre = new Point(fixed.xKm() - (xPx - widthPx / 2) / zoom, fixed.yKm()
+                + (yPx - heightPx / 2) / zoom);
         return new ViewTransform(newCentre, zoom, widthPx, heightPx);
     }
 

@@ -55,7 +55,8 @@ public final class ViewerActions {
     private List<Action> passing() {
         List<Action> now = new ArrayList<>();
         for (Track track : model.ledger().tracks()) {
-            now.add(once("track-" + track.id(), "Selection", "Go to track " + track.id(), () -> model.goToTrack(track.id())));
+            now.add(once("track-" + track.id(), "Selection", "Go to track " + track.id(), () ->
+                    model.goToTrack(track.id())));
         }
         for (Meeting meeting : model.ledger().meetings()) {
             now.add(once("meeting-" + meeting.id(), "Selection", "Go to meeting " + meeting.id(),
@@ -116,7 +117,8 @@ public final class ViewerActions {
         for (PlaneField field : PlaneField.values()) {
             ObservableBooleanValue on = plane.fieldProperty().isEqualTo(field);
             actions.add(new Action("field-" + field.name().toLowerCase(Locale.ROOT), group,
-                    "Show field: " + field.words().toLowerCase(Locale.ROOT), List.of(String.valueOf(1 + field.ordinal())),
+                    "Show field: " + field.words().toLowerCase(Locale.ROOT), List.of(String.valueOf(1
+                            + field.ordinal())),
                     offered(field), Optional.of(on), () -> plane.fieldProperty().set(field)));
         }
         add("fainter", "Make the sweep fainter", open, () -> plane.opacityProperty().set(

@@ -100,6 +100,7 @@ public final class ViewerModel {
         status.open(opened, clock.millis());
         if (afresh) {
             map.open(opened.site());
+            plane.fieldProperty().set(PlaneField.MEASURED);
             reachUnknown = true;
             selection.clear();
             measure.onProperty().set(false);

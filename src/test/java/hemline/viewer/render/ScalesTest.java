@@ -84,7 +84,8 @@ class ScalesTest {
     void velocityLevelsAreWithinAQuarterOfAMetreASecond() {
         int[] palette = Palette.of(hemline.viewer.viewmodel.PlaneField.VELOCITY).argb();
         for (float v = -31; v <= 31; v += 0.3f) {
-            assertThat(lightness(palette[Palette.velocityLevel(v)])).isCloseTo(lightness(VelocityScale.argb(v)), within(1.2));
+            assertThat(lightness(palette[Palette.velocityLevel(v)])).isCloseTo(lightness(VelocityScale.argb(v)),
+                    within(1.2));
         }
         assertThat(palette[Palette.velocityLevel(Float.NaN)]).isZero();
     }

@@ -80,7 +80,8 @@ class PlanePictureTest {
         }
         assertThat(now.getWidth()).isEqualTo(kept.getWidth());
         assertThat(now.getHeight()).isEqualTo(kept.getHeight());
-        assertThat(shareThatDiffers(now, kept)).as("share of pixels that differ plainly; see " + seen).isLessThan(0.002);
+        assertThat(shareThatDiffers(now, kept)).as("share of pixels that differ plainly; see "
+                + seen).isLessThan(0.002);
     }
 
     /** Edges of lines may be smoothed a little differently; a pixel differs plainly by more than 40 of 255. */

@@ -58,7 +58,8 @@ class JobModelTest {
             throw new IOException("a.nc: truncated after 512 bytes; fetch it again");
         });
         runAll();
-        assertThat(job.troubleProperty().get()).isEqualTo("Opening failed: a.nc: truncated after 512 bytes; fetch it again");
+        assertThat(job.troubleProperty().get()).isEqualTo(
+                "Opening failed: a.nc: truncated after 512 bytes; fetch it again");
         job.dismissTrouble();
         assertThat(job.troubleProperty().get()).isEmpty();
     }

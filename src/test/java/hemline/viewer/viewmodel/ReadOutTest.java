@@ -36,7 +36,8 @@ class ReadOutTest {
     }
 
     private static ReadOut at(double azimuth, double km) {
-        return ReadOut.at(Point.towards(azimuth).times(km), new HeldSweep(0, sweep(Optional.empty(), 360), Optional.empty()));
+        return ReadOut.at(Point.towards(azimuth).times(km), new HeldSweep(0, sweep(Optional.empty(), 360),
+                Optional.empty()));
     }
 
     @Test
@@ -86,7 +87,8 @@ class ReadOutTest {
 
     @Test
     void aLostSectorHasNoGate() {
-        ReadOut read = ReadOut.at(Point.towards(300).times(20), new HeldSweep(0, sweep(Optional.empty(), 270), Optional.empty()));
+        ReadOut read = ReadOut.at(Point.towards(300).times(20), new HeldSweep(0, sweep(Optional.empty(), 270),
+                Optional.empty()));
         assertThat(read.gate()).isFalse();
     }
 

@@ -22,7 +22,8 @@ class TracesTest {
     @Test
     void speedIsWeightedByItsUncertainty() {
         Track track = Track.linked("T01", List.of(new TrackPiece(3, BoundaryKind.THIN_LINE, Origin.AUTO, List.of(
-                vertex(0, 10, new Speed(10, 1)), vertex(1, 14, new Speed(14, 2)), vertex(2, Double.NaN, Speed.UNKNOWN)))), 1);
+                vertex(0, 10, new Speed(10, 1)), vertex(1, 14, new Speed(14, 2)), vertex(2, Double.NaN,
+                        Speed.UNKNOWN)))), 1);
         Trace speed = Traces.of(track).get(0);
         // (10/1 + 14/4) / (1 + 1/4) = 10.8; sqrt((1 + 4) / 2) = 1.5811
         assertThat(speed.samples()).hasSize(1);
@@ -36,8 +37,10 @@ class TracesTest {
     @Test
     void lengthCountsAllStretchesOfASweep() {
         Track track = Track.linked("T01", List.of(
-                new TrackPiece(0, BoundaryKind.ARC, Origin.AUTO, List.of(vertex(0, 1, Speed.UNKNOWN), vertex(3, 1, Speed.UNKNOWN))),
-                new TrackPiece(0, BoundaryKind.ARC, Origin.AUTO, List.of(vertex(5, 1, Speed.UNKNOWN), vertex(9, 1, Speed.UNKNOWN)))), 1);
+                new TrackPiece(0, BoundaryKind.ARC, Origin.AUTO, List.of(vertex(0, 1, Speed.UNKNOWN), vertex(3, 1,
+                        Speed.UNKNOWN))),
+                new TrackPiece(0, BoundaryKind.ARC, Origin.AUTO, List.of(vertex(5, 1, Speed.UNKNOWN), vertex(9, 1,
+                        Speed.UNKNOWN)))), 1);
         assertThat(Traces.of(track).get(2).samples()).singleElement()
                 .satisfies(s -> assertThat(s.value()).isCloseTo(7, within(1e-9)));
     }

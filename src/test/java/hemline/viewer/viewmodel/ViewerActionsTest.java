@@ -29,7 +29,8 @@ class ViewerActionsTest {
     @Test
     void everyActionHasItsOwnIdWordsAndKeys() {
         assertThat(actions.all()).extracting(Action::id).doesNotHaveDuplicates();
-        assertThat(actions.all()).extracting(Action::words).doesNotHaveDuplicates().allSatisfy(w -> assertThat(w).isNotBlank());
+        assertThat(actions.all()).extracting(Action::words).doesNotHaveDuplicates().allSatisfy(w ->
+                assertThat(w).isNotBlank());
         assertThat(actions.all().stream().flatMap(a -> a.keys().stream()).toList()).doesNotHaveDuplicates();
     }
 

@@ -71,7 +71,8 @@ class ViewerModelTest {
         model.open(List.of(Path.of("broken")));
         assertThat(model.session()).isNotNull();
         assertThat(model.loop().index()).isEqualTo(4);
-        assertThat(model.job().troubleProperty().get()).contains("ends within the first ray").contains("fetch the file again");
+        assertThat(model.job().troubleProperty().get()).contains("ends within the first ray")
+                .contains("fetch the file again");
     }
 
     @Test
@@ -86,6 +87,14 @@ class ViewerModelTest {
         other.loop().step(1);
         assertThat(other.sweepTroubleProperty().get()).isEmpty();
         assertThat(other.shownProperty().get().index()).isEqualTo(6);
+    }
+
+    @Test
+    void aNewLoopStartsAsMeasuredSinceItIsNotScreenedYet() {
+        open();
+        model.plane().fieldProperty().set(PlaneField.SCREENED);
+        open();
+        assertThat(model.plane().fieldProperty().get()).isEqualTo(PlaneField.MEASURED);
     }
 
     @Test

@@ -51,6 +51,10 @@ final class RunCommand implements Callable<Integer> {
             description = "Pictures to draw: none, overview (default) or all; all when WHICH is left out.")
     private Pictures pictures;
 
+    @Option(names = "--stations", paramLabel = "FILE.csv",
+            description = "Station observations; passages of boundaries over them go to passages.csv.")
+    private Path stations;
+
     @Override
     public Integer call() throws UserProblem {
         if (threads != null && threads < 1) {
@@ -71,6 +75,7 @@ final class RunCommand implements Callable<Integer> {
     private RunRequest request() {
         return new RunRequest(paths, out, loop.choices(), Optional.ofNullable(settings),
                 ceilingM == null ? OptionalDouble.empty() : OptionalDouble.of(ceilingM),
-                threads == null ? Runtime.getRuntime().availableProcessors() : threads, pictures);
+                threads == null ? Runtime.getRuntime().availableProcessors() : threads, pictures,
+                Optional.ofNullable(stations));
     }
 }

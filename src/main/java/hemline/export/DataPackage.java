@@ -10,15 +10,18 @@ import java.util.List;
  */
 final class DataPackage {
     static final List<Table<?>> TABLES = List.of(BoundariesTable.TABLE, TracksTable.TABLE, MeetingsTable.TABLE);
+    /** Written only when stations are given. */
+    static final Table<?> PASSAGES = PassagesTable.TABLE;
 
     private DataPackage() {
     }
 
-    static ObjectNode describe() {
+    /** The tables that are in the folder. */
+    static ObjectNode describe(List<Table<?>> tables) {
         ObjectNode root = Json.object();
         root.put("profile", "tabular-data-package").put("name", "hemline-results");
         ArrayNode resources = root.putArray("resources");
-        for (Table<?> table : TABLES) {
+        for (Table<?> table : tables) {
             resource(resources.addObject(), table);
         }
         return root;
@@ -47,7 +50,7 @@ final class DataPackage {
         if (table == MeetingsTable.TABLE) {
             schema.put("primaryKey", "meeting_id");
         }
-        if (table == BoundariesTable.TABLE) {
+        if (table == BoundariesTable.TABLE || table == PASSAGES) {
             ObjectNode key = schema.putArray("foreignKeys").addObject().put("fields", "track_id");
             key.putObject("reference").put("resource", TracksTable.TABLE.name()).put("fields", "track_id");
         }

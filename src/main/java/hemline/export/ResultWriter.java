@@ -1,5 +1,6 @@
 package hemline.export;
 
+import hemline.boundary.station.StationPassage;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.io.OutputStreamWriter;
@@ -7,6 +8,7 @@ import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import javax.imageio.ImageIO;
 import javax.imageio.stream.MemoryCacheImageOutputStream;
 
@@ -24,13 +26,22 @@ public final class ResultWriter {
         this.folder = folder;
     }
 
-    /** The tables with what explains them, the GeoJSON and the page for people. */
-    public void tables(RunRecord run) throws IOException {
+    /**
+     * The tables with what explains them, the GeoJSON and the page for people.
+     *
+     * @param passages over stations; empty when no stations were given
+     */
+    public void tables(RunRecord run, Optional<List<StationPassage>> passages) throws IOException {
         Geolocation where = new Geolocation(run.analysis().site());
         table(BoundariesTable.TABLE, BoundariesTable.rows(run.analysis().tracks(), where));
         table(TracksTable.TABLE, run.analysis().tracks());
         table(MeetingsTable.TABLE, MeetingsTable.rows(run.analysis().meetings(), where));
-        folder.stage("datapackage.json", out -> Json.write(DataPackage.describe(), out));
+        List<Table<?>> written = new ArrayList<>(DataPackage.TABLES);
+        if (passages.isPresent()) {
+            table(PassagesTable.TABLE, passages.get());
+            written.add(DataPackage.PASSAGES);
+        }
+        folder.stage("datapackage.json", out -> Json.write(DataPackage.describe(written), out));
         folder.stage("boundaries.geojson", out -> BoundariesGeoJson.write(out, run.analysis(), where));
         folder.stageFile("boundaries.nc", file -> BoundariesNetcdf.write(file, run, where));
         folder.stage("summary.html", out -> SummaryHtml.write(out, run));

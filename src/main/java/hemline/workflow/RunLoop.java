@@ -1,5 +1,6 @@
 package hemline.workflow;
 
+import hemline.boundary.station.StationPassage;
 import hemline.casefile.SettingsJson;
 import hemline.export.FolderInUseException;
 import hemline.export.Pictures;
@@ -20,6 +21,7 @@ import java.io.IOException;
 import java.nio.file.FileSystemException;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 /** The main job: opens a loop, analyses it and writes the results. */
 public final class RunLoop {
@@ -30,17 +32,26 @@ public final class RunLoop {
      */
     public RunOutcome run(RunRequest request, Progress progress) throws UserProblem {
         Settings settings = settings(request);
+        Optional<StationWork> stations = stations(request);
         OpenedLoop opened = LoopReading.open(request.paths(), request.reading(), progress);
         try (ResultFolder folder = open(request);
                 Workers workers = new Workers(request.threads())) {
             Analysis analysis = Pipeline.run(opened.loop(), settings, workers, progress);
             RunRecord record = record(opened, analysis, settings);
-            List<String> files = write(folder, record, opened.loop(), request.pictures(), progress);
+            Optional<List<StationPassage>> passages = stations.isPresent()
+                    ? Optional.of(stations.get().passages(analysis)) : Optional.empty();
+            List<String> files = write(folder, record, passages, opened.loop(), request.pictures(), progress);
             return outcome(request, opened, analysis, files);
         } catch (IOException e) {
             throw new UserProblem(Kind.CANNOT_WRITE, "results cannot be written to " + request.out() + ": "
                     + words(e) + "; free some space or choose another folder", e);
         }
+    }
+
+    /** Read before the work begins: a broken table must not cost a run. */
+    private static Optional<StationWork> stations(RunRequest request) throws UserProblem {
+        return request.stations().isPresent() ? Optional.of(new StationWork(request.stations().get()))
+                : Optional.empty();
     }
 
     private static Settings settings(RunRequest request) throws UserProblem {
@@ -67,10 +78,10 @@ public final class RunLoop {
         }
     }
 
-    private static List<String> write(ResultFolder folder, RunRecord record, Loop loop, RunRequest.Pictures which,
-                                      Progress progress) throws IOException {
+    private static List<String> write(ResultFolder folder, RunRecord record, Optional<List<StationPassage>> passages,
+                                      Loop loop, RunRequest.Pictures which, Progress progress) throws IOException {
         ResultWriter writer = new ResultWriter(folder);
-        writer.tables(record);
+        writer.tables(record, passages);
         Pictures pictures = new Pictures(record.analysis(), record.heightCeilingM());
         if (which != RunRequest.Pictures.NONE) {
             progress.check();

@@ -16,14 +16,16 @@ import java.util.OptionalDouble;
  * @param ceilingM height ceiling that goes before any other setting of it, m above the radar
  * @param threads  number of threads, at least 1
  * @param pictures which pictures to draw
+ * @param stations CSV file of station observations to look for passages in
  */
 public record RunRequest(List<Path> paths, Path out, ReadChoices reading, Optional<Path> settings,
-                         OptionalDouble ceilingM, int threads, Pictures pictures) {
+                         OptionalDouble ceilingM, int threads, Pictures pictures, Optional<Path> stations) {
     public RunRequest {
         paths = List.copyOf(paths);
         Objects.requireNonNull(out);
         Objects.requireNonNull(reading);
         Objects.requireNonNull(pictures);
+        Objects.requireNonNull(stations);
         if (threads < 1) {
             throw new IllegalArgumentException("at least one thread is needed, got " + threads);
         }

@@ -38,12 +38,13 @@ import org.testfx.api.FxRobot;
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
 class EveryActionTest {
     private final FxRobot robot = new FxRobot();
+    private final FakeOpener opener = new FakeOpener(FakeLoop::small);
     private Toolkit viewer;
     private ViewerModel model;
 
     @BeforeAll
     void open() throws Exception {
-        viewer = new Toolkit(new FakeOpener(FakeLoop::small), 1280, 720).open();
+        viewer = new Toolkit(opener, 1280, 720).open();
         model = viewer.model;
     }
 
@@ -305,7 +306,7 @@ class EveryActionTest {
         viewer.files = List.of(Path.of("/loops/one.nc"), Path.of("/loops/two.nc"));
         press(KeyCode.CONTROL, KeyCode.O);
         Toolkit.await(() -> !model.job().runningProperty().get());
-        assertThat(viewer.opener.opened).last().isEqualTo(viewer.files);
+        assertThat(opener.opened).last().isEqualTo(viewer.files);
         viewer.folder = Optional.of(Path.of("/loops/broken"));
         press(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.O);
         Toolkit.await(() -> !model.job().runningProperty().get());

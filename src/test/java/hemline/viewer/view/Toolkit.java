@@ -1,8 +1,8 @@
 package hemline.viewer.view;
 
-import hemline.viewer.FakeOpener;
 import hemline.viewer.render.RasterFeed;
 import hemline.viewer.viewmodel.ViewerModel;
+import hemline.workflow.SessionOpener;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.time.Instant;
@@ -31,7 +31,6 @@ final class Toolkit implements WindowDesk.Ask, AutoCloseable {
         System.setProperty("testfx.robot.write_sleep", "0");
     }
 
-    final FakeOpener opener;
     final ViewerModel model;
     final ViewerWindow window;
     final Stage stage;
@@ -41,8 +40,7 @@ final class Toolkit implements WindowDesk.Ask, AutoCloseable {
     Optional<Path> mapLayer = Optional.empty();
     private final ExecutorService background = Executors.newFixedThreadPool(2);
 
-    Toolkit(FakeOpener opener, double width, double height) throws Exception {
-        this.opener = opener;
+    Toolkit(SessionOpener opener, double width, double height) throws Exception {
         FxToolkit.registerPrimaryStage();
         model = onFx(() -> new ViewerModel(opener, background, background, Platform::runLater,
                 Clock.fixed(Instant.parse("2031-07-14T22:12:00Z"), ZoneOffset.UTC)));

@@ -19,7 +19,7 @@ class ViewerOnSampleLoopIT {
     @Test
     void theSampleLoopIsAnalysedAndShown() throws Exception {
         Path sweeps = Path.of(System.getProperty("hemline.basedir", "."), "sample-sweeps");
-        try (Toolkit viewer = new Toolkit(FileSessions.usual(ReadChoices.defaults(), 2), 1600, 1000)) {
+        try (Toolkit viewer = new Toolkit(FileSessions.usual(ReadChoices.defaults(), 2), 1280, 720)) {
             ViewerModel model = viewer.model;
             Toolkit.run(() -> model.open(List.of(sweeps)));
             Toolkit.await(() -> model.shownProperty().get() != null);

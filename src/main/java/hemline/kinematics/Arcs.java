@@ -16,6 +16,8 @@ final class Arcs {
     /** Vertices 1 km apart share their error over some 5 km. */
     private static final double EFFECTIVE_SHARE = 0.2;
     private static final double LEAST_COVERAGE_DEG = 50;
+    /** Under this a moving line and a growing arc with a drifting centre look alike (common practice, no source). */
+    private static final double COVERAGE_TO_PART_DRIFT_DEG = 150;
     private static final double LARGEST_RMS_SHARE = 0.25;
 
     private Arcs() {
@@ -53,14 +55,19 @@ final class Arcs {
         if (fitted.isEmpty()) {
             return Outcome.refused("no arc fits");
         }
-        return judge(fitted.get(), points, x, y, tau, originMs + Math.round(1000 * middle), maxRelativeSd);
+        double coverage = coverageDeg(fitted.get(), x, y, tau);
+        double driftMs = Math.hypot(fitted.get().parameters()[2], fitted.get().parameters()[3]);
+        if (coverage < COVERAGE_TO_PART_DRIFT_DEG && driftMs > 0.6 * Math.abs(typicalSpeedMs)) {
+            return Outcome.refused(String.format(java.util.Locale.ROOT,
+                    "growth not told apart from drift of the centre: only %.0f degrees seen", coverage));
+        }
+        return judge(fitted.get(), points, coverage, originMs + Math.round(1000 * middle), maxRelativeSd);
     }
 
-    private static Outcome judge(GrowingArc arc, TrackPoints points, double[] x, double[] y, double[] tau,
-                                 long referenceMs, double maxRelativeSd) {
+    private static Outcome judge(GrowingArc arc, TrackPoints points, double coverage, long referenceMs,
+                                 double maxRelativeSd) {
         double radius = arc.radiusAtKm(0);
         double relative = arc.radiusSdKm(0) / radius;
-        double coverage = coverageDeg(arc, x, y, tau);
         if (!(relative <= maxRelativeSd)) {
             return Outcome.refused(String.format(java.util.Locale.ROOT,
                     "too short an arc to tell its radius: standard deviation is %.0f %% of it", 100 * relative));

@@ -31,6 +31,7 @@ final class PlaneWords {
 
     private static String of(Track track) {
         return track.id() + (track.speed().isKnown()
-                ? ", moving toward " + Words.bearing(track.bearingDeg()) + " at " + Words.speed(track.speed()) : "");
+                ? ", moving " + (Double.isFinite(track.bearingDeg()) ? "toward " + Words.bearing(track.bearingDeg()) + " " : "")
+                        + "at " + Words.speed(track.speed()) : "");
     }
 }

@@ -30,6 +30,8 @@ final class TracesView extends StackPane {
         column = new VBox(heading);
         column.getChildren().addAll(views);
         views.forEach(view -> VBox.setVgrow(view, Priority.ALWAYS));
+        heading.setWrapText(true);
+        heading.setMinHeight(USE_PREF_SIZE);
         heading.setId("traces-heading");
         heading.getStyleClass().add("traces-heading");
         hint.setWrapText(true);
@@ -49,10 +51,12 @@ final class TracesView extends StackPane {
     }
 
     private void show(Track track) {
-        String arc = track.arc().map(a -> ", expanding " + Words.speed(a.expansion())).orElse("");
-        heading.setText(track.id() + " toward " + Words.bearing(track.bearingDeg()) + " at "
-                + Words.speed(track.speed())
-                + arc + "  (\u00b1 2 sd)");
+        StringBuilder words = new StringBuilder(track.id());
+        // A ring moves every way at once and has no bearing as a whole.
+        words.append(Double.isFinite(track.bearingDeg()) ? " toward " + Words.bearing(track.bearingDeg()) + " at " : ", ")
+                .append(track.speed().isKnown() ? Words.speed(track.speed()) : "speed not known");
+        track.arc().ifPresent(arc -> words.append(", radius growing ").append(Words.speed(arc.expansion())));
+        heading.setText(words.append(" (\u00b1 2 sd)").toString());
         List<Trace> traces = Traces.of(track);
         for (int i = 0; i < views.size(); i++) {
             views.get(i).show(track, traces.get(i));

@@ -51,7 +51,7 @@ public final class ViewerWindow {
         shortcuts = new ShortcutSheet(actions, this::lower);
         side.setOrientation(Orientation.VERTICAL);
         side.getItems().addAll(ledger, new TracesView(model));
-        side.setDividerPositions(0.38);
+        side.setDividerPositions(0.4);
         SplitPane.setResizableWithParent(side, false);
         BorderPane frame = new BorderPane(middle);
         frame.setTop(new VBox(new TopBar(model, actions), new ReadOutStrip(model)));

@@ -20,7 +20,7 @@ public final class MeetingColumns {
                         m -> m.status().label()),
                 LedgerColumn.number("Chance", "%", "Probability that they meet", 0, m -> 100 * m.probability()),
                 LedgerColumn.number("Closing", ms, "Speed at which the gap closed", 1, m -> m.closing().speedMs()),
-                LedgerColumn.number("\u00b1 sd clos.", ms, "One standard deviation of the closing speed", 1,
+                LedgerColumn.number("\u00b1 sd clos.", ms, "One standard deviation of the closing speed", 2,
                         m -> m.closing().sdMs()),
                 LedgerColumn.of("Crossing", "", "Angle between the two lines, 0 to 90 degrees",
                         Meeting::crossingAngleDeg, m -> Words.number(m.crossingAngleDeg(), 0) + "\u00b0"),

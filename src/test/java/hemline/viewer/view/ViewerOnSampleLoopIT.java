@@ -2,6 +2,7 @@ package hemline.viewer.view;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import hemline.viewer.viewmodel.PlaneField;
 import hemline.viewer.viewmodel.ViewerModel;
 import hemline.workflow.FileSessions;
 import hemline.workflow.ReadChoices;
@@ -11,6 +12,7 @@ import java.nio.file.Path;
 import java.util.List;
 import javafx.embed.swing.SwingFXUtils;
 import javafx.scene.control.Label;
+import javafx.scene.control.TitledPane;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
 
@@ -34,6 +36,12 @@ class ViewerOnSampleLoopIT {
                     .max((a, b) -> Double.compare(a.maxLengthKm(), b.maxLengthKm())).orElseThrow().id();
             picture(viewer, "middle-dark", true, model.loop().sizeProperty().get() * 2 / 3, longest);
             picture(viewer, "middle-light", false, model.loop().sizeProperty().get() * 2 / 3, longest);
+            Toolkit.run(() -> {
+                model.plane().fieldProperty().set(PlaneField.REMOVED);
+                model.settings().sidePanelProperty().set(false);
+                ((TitledPane) viewer.stage.getScene().lookup("#legend")).setExpanded(true);
+            });
+            picture(viewer, "removed-dark", true, model.loop().sizeProperty().get() * 2 / 3, longest);
             Label heading = (Label) viewer.stage.getScene().lookup("#traces-heading");
             assertThat(heading.getText()).startsWith(longest);
         }

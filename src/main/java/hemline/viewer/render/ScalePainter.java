@@ -89,7 +89,7 @@ public final class ScalePainter {
             case SPECKLE -> "speckle";
             case SECOND_TRIP -> "2nd trip";
             case BLOCKED -> "blocked";
-            case DEEP_CONVECTION -> "deep conv.";
+            case DEEP_CONVECTION -> "deep rain";
             case ABOVE_CEILING -> "too high";
         };
     }

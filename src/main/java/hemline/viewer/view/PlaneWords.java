@@ -30,8 +30,8 @@ final class PlaneWords {
     }
 
     private static String of(Track track) {
+        String toward = Double.isFinite(track.bearingDeg()) ? "toward " + Words.bearing(track.bearingDeg()) + " " : "";
         return track.id() + (track.speed().isKnown()
-                ? ", moving " + (Double.isFinite(track.bearingDeg()) ? "toward " + Words.bearing(track.bearingDeg()) + " " : "")
-                        + "at " + Words.speed(track.speed()) : "");
+                ? ", moving " + toward + "at " + Words.speed(track.speed()) : "");
     }
 }

@@ -53,7 +53,8 @@ final class TracesView extends StackPane {
     private void show(Track track) {
         StringBuilder words = new StringBuilder(track.id());
         // A ring moves every way at once and has no bearing as a whole.
-        words.append(Double.isFinite(track.bearingDeg()) ? " toward " + Words.bearing(track.bearingDeg()) + " at " : ", ")
+        boolean oneWay = Double.isFinite(track.bearingDeg());
+        words.append(oneWay ? " toward " + Words.bearing(track.bearingDeg()) + " at " : ", ")
                 .append(track.speed().isKnown() ? Words.speed(track.speed()) : "speed not known");
         track.arc().ifPresent(arc -> words.append(", radius growing ").append(Words.speed(arc.expansion())));
         heading.setText(words.append(" (\u00b1 2 sd)").toString());

@@ -36,14 +36,14 @@ class ViewerOnSampleLoopIT {
                     .max((a, b) -> Double.compare(a.maxLengthKm(), b.maxLengthKm())).orElseThrow().id();
             picture(viewer, "middle-dark", true, model.loop().sizeProperty().get() * 2 / 3, longest);
             picture(viewer, "middle-light", false, model.loop().sizeProperty().get() * 2 / 3, longest);
+            Label heading = (Label) viewer.stage.getScene().lookup("#traces-heading");
+            assertThat(heading.getText()).startsWith(longest);
             Toolkit.run(() -> {
                 model.plane().fieldProperty().set(PlaneField.REMOVED);
                 model.settings().sidePanelProperty().set(false);
                 ((TitledPane) viewer.stage.getScene().lookup("#legend")).setExpanded(true);
             });
             picture(viewer, "removed-dark", true, model.loop().sizeProperty().get() * 2 / 3, longest);
-            Label heading = (Label) viewer.stage.getScene().lookup("#traces-heading");
-            assertThat(heading.getText()).startsWith(longest);
         }
     }
 

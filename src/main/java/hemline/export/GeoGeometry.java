@@ -1,12 +1,29 @@
 package hemline.export;
 
 import com.fasterxml.jackson.core.JsonGenerator;
+import hemline.geodesy.GeoPoint;
 import java.io.IOException;
 import java.util.List;
+import java.util.Optional;
 
 /** Bounding boxes and geometries of GeoJSON features, RFC 7946 sections 3.1 and 5. */
 final class GeoGeometry {
     private GeoGeometry() {
+    }
+
+    /** The {@code geometry} member: a point, or none. */
+    static void point(JsonGenerator json, Optional<GeoPoint> place) throws IOException {
+        if (place.isEmpty()) {
+            json.writeNullField("geometry");
+            return;
+        }
+        json.writeObjectFieldStart("geometry");
+        json.writeStringField("type", "Point");
+        json.writeArrayFieldStart("coordinates");
+        degrees(json, place.get().longitudeDeg());
+        degrees(json, place.get().latitudeDeg());
+        json.writeEndArray();
+        json.writeEndObject();
     }
 
     /** The {@code bbox} and {@code geometry} members: a line, several lines, or none. */

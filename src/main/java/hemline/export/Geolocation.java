@@ -4,6 +4,7 @@ import hemline.geodesy.GeoPoint;
 import hemline.geodesy.LocalPlane;
 import hemline.geometry.Point;
 import hemline.sweep.RadarSite;
+import java.util.List;
 import java.util.Optional;
 
 /** Latitude and longitude of places on the plane, or not available where the radar's own place is unknown. */
@@ -16,6 +17,11 @@ final class Geolocation {
 
     Optional<GeoPoint> of(Point place) {
         return plane.map(p -> p.toGeo(place));
+    }
+
+    /** A whole line; empty where the radar's place is unknown. */
+    List<GeoPoint> line(List<Point> points) {
+        return plane.map(p -> points.stream().map(p::toGeo).toList()).orElse(List.of());
     }
 
     boolean known() {

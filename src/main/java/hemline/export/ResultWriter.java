@@ -1,5 +1,6 @@
 package hemline.export;
 
+import hemline.boundary.Track;
 import hemline.boundary.station.StationPassage;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
@@ -43,6 +44,8 @@ public final class ResultWriter {
         }
         folder.stage("datapackage.json", out -> Json.write(DataPackage.describe(written), out));
         folder.stage("boundaries.geojson", out -> BoundariesGeoJson.write(out, run.analysis(), where));
+        folder.stage("arcs.geojson", out -> ArcsGeoJson.write(out, run.analysis(), where));
+        folder.stage("meetings.geojson", out -> MeetingsGeoJson.write(out, run.analysis(), where));
         folder.stageFile("boundaries.nc", file -> BoundariesNetcdf.write(file, run, where));
         folder.stage("summary.html", out -> SummaryHtml.write(out, run));
     }
@@ -56,6 +59,41 @@ public final class ResultWriter {
                 }
             }
         });
+    }
+
+    /** The pictures of all sweeps, asked for one at a time, as an animation. */
+    public void animation(String name, int count, PictureOfSweep pictures) throws IOException {
+        folder.stage(name, out -> {
+            try (Animation animation = new Animation(out)) {
+                for (int i = 0; i < count; i++) {
+                    animation.add(pictures.of(i), i == count - 1);
+                }
+            }
+        });
+    }
+
+    /** Speed, radius and length of each track against time, as SVG. */
+    public void traces(RunRecord run) throws IOException {
+        FrameSpan span = FrameSpan.of(run.analysis().frames());
+        TraceChart chart = new TraceChart(span.firstMs(), span.lastMs());
+        List<Track> tracks = run.analysis().tracks();
+        for (int i = 0; i < tracks.size(); i++) {
+            Track track = tracks.get(i);
+            String colour = PaperInk.track(i);
+            for (Series series : List.of(Series.speed(track), Series.radius(track), Series.length(track))) {
+                if (!series.values().isEmpty()) {
+                    String drawing = chart.draw(track.id(), series, colour);
+                    folder.stage("traces/" + track.id() + "-" + series.key() + ".svg",
+                            out -> out.write(drawing.getBytes(StandardCharsets.UTF_8)));
+                }
+            }
+        }
+    }
+
+    /** Gives the picture of a sweep by its index. */
+    @FunctionalInterface
+    public interface PictureOfSweep {
+        BufferedImage of(int sweep) throws IOException;
     }
 
     /**

@@ -9,10 +9,11 @@ import java.util.List;
 /**
  * One quantity of a track against time, a value a sweep.
  *
+ * @param key    short name for files
  * @param name   what it is, with its unit
  * @param values by rising time
  */
-record Series(String name, List<Value> values) {
+record Series(String key, String name, List<Value> values) {
     Series {
         values = List.copyOf(values);
     }
@@ -51,12 +52,12 @@ record Series(String name, List<Value> values) {
                 values.add(new Value(first + Math.round(time / known), speed / known, sd / known));
             }
         }
-        return new Series("normal speed, m s⁻¹", values);
+        return new Series("speed", "normal speed, m s⁻¹", values);
     }
 
     /** The fitted radius at each sweep, km; empty for a track without an arc. */
     static Series radius(Track track) {
-        return new Series("radius, km", track.arc().map(arc -> arc.radii().stream()
+        return new Series("radius", "radius, km", track.arc().map(arc -> arc.radii().stream()
                 .map(r -> new Value(r.timeMs(), r.radiusKm(), r.sdKm())).toList()).orElse(List.of()));
     }
 
@@ -67,6 +68,6 @@ record Series(String name, List<Value> values) {
             values.add(new Value(pieces.get(0).meanTimeMs(),
                     pieces.stream().mapToDouble(p -> p.line().lengthKm()).sum(), Double.NaN));
         }
-        return new Series("length, km", values);
+        return new Series("length", "length, km", values);
     }
 }

@@ -78,7 +78,7 @@ final class TrackLayer {
         diamond.lineTo(x, y + 8);
         diamond.lineTo(x - 8, y);
         diamond.closePath();
-        ellipse(meeting);
+        ink.rimmedLine(PlaneLayer.line(view, MeetingsGeoJson.ellipse(meeting)), Ink.MEETING, 1);
         if (meeting.status() == Meeting.Status.OBSERVED) {
             ink.graphics().setColor(Ink.MEETING);
             ink.graphics().fill(diamond);
@@ -86,21 +86,5 @@ final class TrackLayer {
         ink.rimmedLine(diamond, Ink.MEETING, 1.8);
         ink.rimmedWords(meeting.id() + " " + Times.clock(meeting.timeMs()).substring(0, 5), x + 12, y + 4, 11,
                 Ink.MEETING);
-    }
-
-    private void ellipse(Meeting meeting) {
-        Point major = Point.towards(meeting.ellipse().majorBearingDeg()).times(meeting.ellipse().majorKm());
-        Point minor = Point.towards(meeting.ellipse().majorBearingDeg() + 90).times(meeting.ellipse().minorKm());
-        Path2D path = new Path2D.Double();
-        for (int i = 0; i <= 72; i++) {
-            double turn = Math.toRadians(5 * i);
-            Point at = meeting.place().plus(major.times(Math.cos(turn))).plus(minor.times(Math.sin(turn)));
-            if (i == 0) {
-                path.moveTo(view.x(at), view.y(at));
-            } else {
-                path.lineTo(view.x(at), view.y(at));
-            }
-        }
-        ink.rimmedLine(path, Ink.MEETING, 1);
     }
 }

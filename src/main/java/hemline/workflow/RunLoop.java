@@ -17,6 +17,7 @@ import hemline.reader.OpenedLoop;
 import hemline.sweep.Loop;
 import hemline.sweep.Progress;
 import hemline.workflow.UserProblem.Kind;
+import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.FileSystemException;
 import java.util.List;
@@ -88,13 +89,14 @@ public final class RunLoop {
             writer.picture("overview.png", pictures.overview(loop.sweep(loop.size() - 1)));
         }
         if (which == RunRequest.Pictures.ALL) {
-            for (int i = 0; i < loop.size(); i++) {
+            writer.traces(record);
+            writer.animation("loop.gif", loop.size(), i -> {
                 progress.check();
-                progress.step("drawing", i, loop.size());
-                writer.picture(String.format(Locale.ROOT, "pictures/sweep-%03d.png", i),
-                        pictures.sweep(i, loop.sweep(i)));
-            }
-            progress.step("drawing", loop.size(), loop.size());
+                BufferedImage picture = pictures.sweep(i, loop.sweep(i));
+                writer.picture(String.format(Locale.ROOT, "pictures/sweep-%03d.png", i), picture);
+                progress.step("drawing", i + 1, loop.size());
+                return picture;
+            });
         }
         progress.check();
         return writer.finish(record);

@@ -6,6 +6,8 @@ import static org.assertj.core.api.Assertions.within;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import hemline.geodesy.GeoPoint;
+import hemline.geodesy.LocalPlane;
+import hemline.geometry.Point;
 import hemline.pipeline.Analysis;
 import hemline.sweep.RadarSite;
 import java.io.ByteArrayOutputStream;
@@ -61,6 +63,44 @@ class GeoLinesTest {
         JsonNode line = root.get("features").get(3);
         assertThat(line.get("geometry").get("type").asText()).isEqualTo("MultiLineString");
         assertThat(line.get("properties").get("track_speed_ms").isNull()).isTrue();
+    }
+
+    private interface Writing {
+        void to(ByteArrayOutputStream out) throws IOException;
+    }
+
+    private static JsonNode features(Writing writing) throws IOException {
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        writing.to(out);
+        return new ObjectMapper().readTree(out.toByteArray()).get("features");
+    }
+
+    @Test
+    void arcsAreCirclesAroundTheMovingCentre() throws IOException {
+        Analysis analysis = InventedAnalysis.at(InventedAnalysis.PLACED);
+        JsonNode arcs = features(out -> ArcsGeoJson.write(out, analysis, new Geolocation(analysis.site())));
+        assertThat(arcs).hasSize(3 + 1);
+        LocalPlane plane = new LocalPlane(InventedAnalysis.PLACED.position().orElseThrow());
+        Point centre = analysis.tracks().get(0).arc().orElseThrow().centreAt(InventedAnalysis.START_MS);
+        for (JsonNode place : arcs.get(0).get("geometry").get("coordinates")) {
+            Point at = plane.toPlane(new GeoPoint(place.get(1).asDouble(), place.get(0).asDouble()));
+            assertThat(at.distanceKm(centre)).isCloseTo(10, within(0.001));
+        }
+        assertThat(arcs.get(3).get("properties").get("what").asText()).isEqualTo("centre");
+    }
+
+    @Test
+    void meetingsArePointsWithTheirEllipse() throws IOException {
+        Analysis analysis = InventedAnalysis.at(InventedAnalysis.PLACED);
+        JsonNode meetings = features(out -> MeetingsGeoJson.write(out, analysis, new Geolocation(analysis.site())));
+        assertThat(meetings).hasSize(2);
+        assertThat(meetings.get(0).get("geometry").get("type").asText()).isEqualTo("Point");
+        JsonNode rim = meetings.get(1).get("geometry").get("coordinates");
+        assertThat(rim.get(0)).isEqualTo(rim.get(rim.size() - 1));
+        LocalPlane plane = new LocalPlane(InventedAnalysis.PLACED.position().orElseThrow());
+        Point tip = plane.toPlane(new GeoPoint(rim.get(0).get(1).asDouble(), rim.get(0).get(0).asDouble()));
+        assertThat(tip.minus(new Point(-12.345, 6.5)).bearingDeg()).isCloseTo(35, within(0.1));
+        assertThat(tip.distanceKm(new Point(-12.345, 6.5))).isCloseTo(1.5, within(0.001));
     }
 
     @Test

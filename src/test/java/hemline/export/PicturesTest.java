@@ -11,6 +11,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import javax.imageio.ImageIO;
+import javax.imageio.ImageReader;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -73,6 +74,21 @@ class PicturesTest {
         byte[] bytes = Files.readAllBytes(temp.resolve("a.png"));
         assertThat(bytes).isEqualTo(Files.readAllBytes(temp.resolve("b.png")));
         assertThat(ImageIO.read(new ByteArrayInputStream(bytes)).getWidth()).isEqualTo(1060);
+    }
+
+    @Test
+    void theAnimationHoldsEverySweepAndRunsForEver(@TempDir Path temp) throws IOException {
+        try (ResultFolder folder = ResultFolder.open(temp)) {
+            new ResultWriter(folder).animation("loop.gif", 3,
+                    i -> pictures.sweep(i, InventedSweep.of(i, InventedAnalysis.PLACED)));
+            folder.publish();
+        }
+        byte[] bytes = Files.readAllBytes(temp.resolve("loop.gif"));
+        ImageReader reader = ImageIO.getImageReadersByFormatName("gif").next();
+        reader.setInput(ImageIO.createImageInputStream(new ByteArrayInputStream(bytes)));
+        assertThat(reader.getNumImages(true)).isEqualTo(3);
+        assertThat(new String(bytes, java.nio.charset.StandardCharsets.ISO_8859_1)).startsWith("GIF89a")
+                .contains("NETSCAPE2.0");
     }
 
     @Test

@@ -18,7 +18,7 @@ final class LocalMotion {
     /** Cosine of the largest turn between a vertex's normal and those it is compared with. */
     private static final double TURN_COS = Math.cos(Math.toRadians(40));
     /** Cauchy scales of the passes, km. */
-    private static final double[] SCALES_KM = {2, 1, 0.6, 0.6};
+    private static final double[] SCALES_KM = {2, 0.8, 0.6};
     /** Position error that neighbours in one sweep share, km. */
     private static final double SHARED_KM = 0.3;
     /** Neighbouring vertices that share one error. */
@@ -106,7 +106,7 @@ final class LocalMotion {
             equations.prior(4, 0, 4);
             equations.prior(5, 0, 1 / square(0.02));
             equations.prior(6, 0, 1 / square(0.7));
-            if (!equations.solve(solved, covariance)) {
+            if (!equations.solve(solved, pass == SCALES_KM.length - 1 ? covariance : null)) {
                 return null;
             }
         }

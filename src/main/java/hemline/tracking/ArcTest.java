@@ -4,6 +4,8 @@ import hemline.geometry.GrowingArc;
 import hemline.geometry.GrowingArcFit;
 import hemline.numerics.Robust;
 import java.util.Arrays;
+import java.util.IdentityHashMap;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -21,6 +23,7 @@ final class ArcTest {
 
     private final VertexCloud cloud;
     private final MotionLattice.Motion motion;
+    private final Map<int[], Optional<GrowingArc>> fits = new IdentityHashMap<>();
 
     ArcTest(VertexCloud cloud, MotionLattice.Motion motion) {
         this.cloud = cloud;
@@ -88,7 +91,27 @@ final class ArcTest {
         return 0.5 * (first + last);
     }
 
+    /** Fits are kept by the very array, since groups are compared with many others. */
     private Optional<GrowingArc> fit(int[] vertices) {
+        return fits.computeIfAbsent(vertices, this::fitNow);
+    }
+
+    /**
+     * Whether the arc of either set alone comes anywhere near the other: a cheap question before the joint fit. Sets
+     * without an arc of their own are near everything.
+     */
+    boolean near(int[] a, int[] b, double withinKm) {
+        return medianOffKm(a, b) < withinKm || medianOffKm(b, a) < withinKm;
+    }
+
+    private double medianOffKm(int[] fitted, int[] vertices) {
+        Optional<GrowingArc> arc = fit(fitted);
+        double middle = middleS(fitted);
+        return arc.isEmpty() ? 0 : Robust.median(Arrays.stream(vertices).filter(i -> (i & 3) == 0).mapToDouble(
+                i -> Math.abs(arc.get().offsetKm(cloud.x[i], cloud.y[i], (cloud.timeS[i] - middle) / 1000))).toArray());
+    }
+
+    private Optional<GrowingArc> fitNow(int[] vertices) {
         int stride = Math.max(1, vertices.length / MOST_POINTS);
         int n = (vertices.length + stride - 1) / stride;
         double[] x = new double[n];

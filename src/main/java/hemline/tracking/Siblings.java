@@ -20,6 +20,8 @@ final class Siblings {
     private static final double LOCAL_KM = 35;
     private static final double LOCAL_GAP_KM = 32;
     private static final double LOCAL_MEAN = 1.0;
+    /** Groups whose arcs pass each other by more than this are not compared further, km. */
+    private static final double FAR_OFF_KM = 12;
     private static final double LONGEST_PAUSE_S = 2400;
 
     private final VertexCloud cloud;
@@ -103,6 +105,9 @@ final class Siblings {
     /** How well one arc explains both; NaN when it does not. */
     private double meanIfOne(int[] a, int[] b) {
         if (Math.min(a.length, b.length) < LEAST_JOINED || sweeps(a) < 2 || sweeps(b) < 2 || pause(a, b) > LONGEST_PAUSE_S) {
+            return Double.NaN;
+        }
+        if (!test.near(a, b, FAR_OFF_KM)) {
             return Double.NaN;
         }
         Optional<ArcTest.Outcome> whole = test.compare(a, b);

@@ -1,6 +1,8 @@
 package hemline.tracking;
 
 import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.core.type.TypeReference;
+import hemline.boundary.ObservedBoundary;
 import hemline.boundary.truth.Truth;
 import hemline.geodesy.BeamGeometry;
 import hemline.simulation.SimulatedLoop;
@@ -51,5 +53,15 @@ record BenchLoop(Truth truth, List<Frame> rays) {
 
     static BenchLoop read(Path file) throws IOException {
         return new ObjectMapper().readValue(file.toFile(), BenchLoop.class);
+    }
+
+    static void writeFound(List<ObservedBoundary> found, Path file) throws IOException {
+        new ObjectMapper().writeValue(file.toFile(), found);
+    }
+
+    static List<ObservedBoundary> readFound(Path file) throws IOException {
+        return new ObjectMapper().configure(com.fasterxml.jackson.databind.DeserializationFeature
+                .FAIL_ON_UNKNOWN_PROPERTIES, false).readValue(file.toFile(), new TypeReference<>() {
+                });
     }
 }

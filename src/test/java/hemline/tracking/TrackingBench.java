@@ -4,6 +4,8 @@ import hemline.boundary.Meeting;
 import hemline.boundary.ObservedBoundary;
 import hemline.boundary.Track;
 import hemline.boundary.truth.Truth;
+import hemline.detection.Detection;
+import hemline.detection.DetectionSettings;
 import hemline.kinematics.Kinematics;
 import hemline.kinematics.KinematicsSettings;
 import hemline.meeting.MeetingSettings;
@@ -14,11 +16,14 @@ import hemline.scoring.Score;
 import hemline.scoring.ScoreSettings;
 import hemline.scoring.Scores;
 import hemline.scoring.Scoring;
+import hemline.screening.Screening;
+import hemline.screening.ScreeningSettings;
 import hemline.simulation.Radars;
 import hemline.simulation.Scenes;
 import hemline.simulation.SimulatedLoop;
 import hemline.simulation.Simulation;
 import hemline.sweep.Progress;
+import hemline.sweep.ScreenedLoop;
 import hemline.sweep.SweepFrame;
 import java.io.IOException;
 import java.io.PrintStream;
@@ -29,8 +34,9 @@ import java.util.List;
 import java.util.Locale;
 
 /**
- * Scores linking and measuring on invented loops, given what a good but imperfect detector would find. Run by hand:
- * {@code TrackingBench CACHE-DIR [scene...]}. Loops are kept in the cache, which can be deleted.
+ * Scores linking and measuring on invented loops, given what a good but imperfect detector would find or what
+ * detection does find. Run by hand: {@code TrackingBench seen|found CACHE-DIR [scene...]}. Loops and what was found in
+ * them are kept in the cache, which can be deleted.
  */
 public final class TrackingBench {
     private static final Measure[] SHOWN = {Measure.RECALL, Measure.PRECISION, Measure.POSITION_MEDIAN,
@@ -43,8 +49,9 @@ public final class TrackingBench {
     }
 
     public static void main(String[] args) throws IOException {
-        Path cache = Path.of(args[0]);
-        List<String> scenes = args.length > 1 ? List.of(args).subList(1, args.length) : Scenes.names();
+        boolean detected = args[0].equals("found");
+        Path cache = Path.of(args[1]);
+        List<String> scenes = args.length > 2 ? List.of(args).subList(2, args.length) : Scenes.names();
         PrintStream out = System.out;
         out.printf("%-34s", "scene");
         for (Measure measure : SHOWN) {
@@ -58,8 +65,8 @@ public final class TrackingBench {
             for (String scene : scenes) {
                 List<Score> kind = new ArrayList<>();
                 for (String radar : Radars.names()) {
-                    for (long seed = 1; seed <= 2; seed++) {
-                        kind.add(one(cache, scene, radar, seed, workers, out));
+                    for (long seed = 1; seed <= Long.getLong("seeds", 2); seed++) {
+                        kind.add(one(cache, scene, radar, seed, detected, workers, out));
                     }
                 }
                 row(out, "= " + scene, Scores.pool(kind), 0, 0);
@@ -69,7 +76,8 @@ public final class TrackingBench {
         row(out, "ALL", Scores.pool(all), 0, 0);
     }
 
-    private static Score one(Path cache, String scene, String radar, long seed, Workers workers, PrintStream out)
+    private static Score one(Path cache, String scene, String radar, long seed, boolean detected,
+                             Workers workers, PrintStream out)
             throws IOException {
         Path kept = cache.resolve(scene + "-" + radar + "-" + seed + ".loop");
         BenchLoop loop;
@@ -82,7 +90,9 @@ public final class TrackingBench {
         }
         Truth truth = loop.truth();
         List<SweepFrame> frames = loop.frames();
-        List<ObservedBoundary> found = new SeenTruth(seed, 0.3, 0.12, 4).of(truth, frames);
+        List<ObservedBoundary> found = detected
+                ? detected(kept.resolveSibling(kept.getFileName() + ".found"), scene, radar, seed, workers)
+                : new SeenTruth(seed, 0.3, 0.12, 4).of(truth, frames);
         long start = System.nanoTime();
         List<Track> tracks = Tracking.link(found, frames, TrackingSettings.defaults(), Progress.NONE);
         tracks = Kinematics.measure(tracks, frames, KinematicsSettings.defaults());
@@ -91,6 +101,16 @@ public final class TrackingBench {
         Score score = Scoring.score(truth, tracks, meetings, ScoreSettings.defaults().withBootstrap(0, 1));
         row(out, scene + " " + radar + " " + seed, score, tracks.size(), ms);
         return score;
+    }
+
+    private static List<ObservedBoundary> detected(Path kept, String scene, String radar, long seed, Workers workers)
+            throws IOException {
+        if (!Files.exists(kept)) {
+            SimulatedLoop made = Simulation.of(scene, radar, seed).prepare(workers, Progress.NONE);
+            ScreenedLoop screened = Screening.learn(made, ScreeningSettings.defaults(), workers, Progress.NONE);
+            BenchLoop.writeFound(Detection.detect(screened, DetectionSettings.defaults(), workers, Progress.NONE), kept);
+        }
+        return BenchLoop.readFound(kept);
     }
 
     private static void row(PrintStream out, String name, Score score, int tracks, double ms) {

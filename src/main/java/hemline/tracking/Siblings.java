@@ -34,7 +34,8 @@ final class Siblings {
         test = new ArcTest(cloud, motion);
     }
 
-    private int[] vertices(List<Integer> group) {
+    /** The vertices of a group, rising. */
+    int[] vertices(List<Integer> group) {
         int[] all = new int[group.stream().mapToInt(p -> pieces.get(p).to() - pieces.get(p).from()).sum()];
         int at = 0;
         for (int p : group.stream().sorted().toList()) {

@@ -1,73 +1,77 @@
 package hemline.tracking;
 
 import hemline.numerics.Robust;
-import java.util.ArrayList;
-import java.util.List;
-import java.util.SortedMap;
-import java.util.TreeMap;
+import java.util.Locale;
 
 /**
- * What speaks for a group of pieces being a moving boundary.
+ * What speaks for a group of pieces being a boundary that moves through the air.
+ *
+ * <p>The score is the logit of a logistic regression on the terms below, fitted to invented loops and parts of loops;
+ * every weight has the sign that physics asks for.
  *
  * @param sweeps     sweeps in which it is seen
  * @param lengthKm   length in its longest sweep, km
  * @param meanKm     mean length in the sweeps that see it, km
- * @param movedKm    median path along the normals over its life, km
- * @param evidence   mean over its vertices of the evidence along the best chain
+ * @param strength   median evidence in one sweep and its neighbours, standard deviations of the background
+ * @param chain      median evidence along the best chain through the loop
  * @param speedMs    median speed, m s⁻¹
- * @param logFalse   median over its vertices of log₁₀ of the chance lines expected in the loop
+ * @param advanceMs  median speed relative to what drifts with the air, m s⁻¹
  */
-record TrackQuality(int sweeps, double lengthKm, double meanKm, double movedKm, double evidence, double speedMs,
-                    double logFalse) {
-    /** Evidence that uneven air reaches in three sweeps. */
-    private static final double CHANCE_IN_THREE = 2.3;
-    /** What each further sweep adds to the evidence that uneven air reaches: it drifts, and so coheres a little. */
-    private static final double CHANCE_A_SWEEP = 0.2;
-    /** Evidence that uneven air does not reach however long it is watched. */
-    private static final double CHANCE_AT_MOST = 3.7;
+record TrackQuality(int sweeps, double lengthKm, double meanKm, double strength, double chain, double speedMs,
+                    double advanceMs) {
+    private static final double PER_STRENGTH = 1.45;
+    private static final double PER_LOG_LENGTH = 1.45;
+    private static final double PER_CHAIN = 0.55;
+    private static final double MOST_CHAIN = 6;
+    private static final double PER_ADVANCE = 0.55;
+    private static final double LEAST_ADVANCE = -3;
+    private static final double MOST_ADVANCE = 8;
+    private static final double CONSTANT = -13.6;
 
-    static TrackQuality of(List<Integer> group, List<Piece> pieces, VertexCloud cloud, MotionLattice.Motion motion) {
-        SortedMap<Integer, Double> bySweep = new TreeMap<>();
-        double evidence = 0;
-        double total = 0;
-        double first = Double.POSITIVE_INFINITY;
-        double last = Double.NEGATIVE_INFINITY;
-        List<Double> speeds = new ArrayList<>();
-        List<Double> logFalse = new ArrayList<>();
-        for (int p : group) {
-            Piece piece = pieces.get(p);
-            bySweep.merge(piece.sweep(), piece.lengthKm(), Double::sum);
-            for (int i = piece.from(); i < piece.to(); i++) {
-                evidence += motion.total()[i];
-                total++;
-                first = Math.min(first, cloud.timeS[i]);
-                last = Math.max(last, cloud.timeS[i]);
-                speeds.add(Math.abs(motion.speedMs()[i]));
-                logFalse.add(cloud.boundaries.get(cloud.curve[i]).evidence().logExpectedFalse());
-            }
+    static TrackQuality of(int[] vertices, VertexCloud cloud, MotionLattice.Motion motion, AmbientDrift drift) {
+        int n = vertices.length;
+        double[] strength = new double[n];
+        double[] chain = new double[n];
+        double[] speed = new double[n];
+        double[] advance = new double[n];
+        int[] perSweep = new int[cloud.sweeps];
+        for (int k = 0; k < n; k++) {
+            int i = vertices[k];
+            perSweep[cloud.sweep[i]]++;
+            strength[k] = cloud.strength[i];
+            chain[k] = motion.total()[i];
+            speed[k] = Math.abs(motion.speedMs()[i]);
+            advance[k] = drift.advanceMs(cloud.normalX[i], cloud.normalY[i], motion.speedMs()[i]);
         }
-        double speed = median(speeds);
-        double longest = bySweep.values().stream().mapToDouble(v -> v).max().orElse(0);
-        return new TrackQuality(bySweep.size(), longest, total / bySweep.size(), speed * (last - first) / 1000,
-                evidence / total, speed, median(logFalse));
+        int sweeps = 0;
+        int longest = 0;
+        for (int count : perSweep) {
+            sweeps += count > 0 ? 1 : 0;
+            longest = Math.max(longest, count);
+        }
+        return new TrackQuality(sweeps, longest, (double) n / sweeps, Robust.median(strength), Robust.median(chain),
+                Robust.median(speed), Robust.median(advance));
     }
 
-    private static double median(List<Double> values) {
-        return Robust.median(values.stream().mapToDouble(v -> v).toArray());
+    /** What speaks for it before it is known what drifts with the air. */
+    double scoreAtRest() {
+        return CONSTANT + PER_STRENGTH * strength + PER_LOG_LENGTH * Math.log(Math.max(1, meanKm))
+                + PER_CHAIN * Math.min(MOST_CHAIN, chain);
     }
 
-    /**
-     * Larger is surer; 0 is the default limit. What counts is by how much the evidence exceeds the most that drifting
-     * unevenness of the air was seen to reach in as many sweeps; improbable single sweeps and length add to it.
-     */
+    /** Larger is surer; 0 is the default limit. */
     double score() {
-        double chance = Math.min(CHANCE_AT_MOST, CHANCE_IN_THREE + CHANCE_A_SWEEP * (sweeps - 3));
-        double improbable = Math.max(-0.4, Math.min(0.6, 0.1 * (-logFalse - 6)));
-        return 1.5 * (evidence - chance + improbable) + 0.3 * Math.log(Math.max(meanKm, 1) / 20);
+        return scoreAtRest() + PER_ADVANCE * Math.max(LEAST_ADVANCE, Math.min(MOST_ADVANCE, advanceMs));
     }
 
     boolean keep(TrackingSettings settings) {
-        return sweeps >= settings.minSweeps() && lengthKm >= settings.minLengthKm() && movedKm >= 2.5
-                && score() >= settings.minScore();
+        return sweeps >= settings.minSweeps() && lengthKm >= settings.minLengthKm() && score() >= settings.minScore();
+    }
+
+    /** The terms of the score, for people. */
+    String inWords() {
+        return String.format(Locale.ROOT,
+                "score %.1f: %d sweeps, %.0f km on average, strength %.1f, chain %.1f, %.1f m/s, %.1f m/s through the air",
+                score(), sweeps, meanKm, strength, chain, speedMs, advanceMs);
     }
 }

@@ -16,6 +16,9 @@ public final class Tracking {
     /** Least shared length for the size of the smaller group at which two groups are joined. */
     private static final double LEAST_SHARE = 0.05;
 
+    private static final int LEAST_LITTER = 12;
+    private static final double LITTER_SCORE = -3.5;
+
     private Tracking() {
     }
 
@@ -44,17 +47,25 @@ public final class Tracking {
         List<List<Integer>> groups = siblings.join(new Grouping(LEAST_SHARE, siblings::mayJoin).group(pieces, links));
         progress.step("linking", 2, 3);
         progress.check();
+        List<int[]> vertices = groups.stream().map(siblings::vertices).toList();
+        AmbientDrift drift = AmbientDrift.of(litter(vertices, cloud, motion), cloud, motion);
         TrackBuilder builder = new TrackBuilder(cloud, motion, frames);
         List<Draft> drafts = new ArrayList<>();
-        for (List<Integer> group : groups) {
-            TrackQuality quality = TrackQuality.of(group, pieces, cloud, motion);
+        for (int g = 0; g < groups.size(); g++) {
+            TrackQuality quality = TrackQuality.of(vertices.get(g), cloud, motion, drift);
             if (quality.keep(settings)) {
-                drafts.add(new Draft(builder.strands(group, pieces), cloud.sweeps, quality.score()));
+                drafts.add(new Draft(builder.strands(groups.get(g), pieces), cloud.sweeps, quality.score()));
             }
         }
         List<Track> named = name(finish(drafts, frames, cloud.originMs, settings), builder);
         progress.step("linking", 3, 3);
         return named;
+    }
+
+    /** Groups that are no boundaries whatever their motion: they tell how the air drifts. */
+    private static List<int[]> litter(List<int[]> groups, VertexCloud cloud, MotionLattice.Motion motion) {
+        return groups.stream().filter(group -> group.length >= LEAST_LITTER
+                && TrackQuality.of(group, cloud, motion, AmbientDrift.NONE).scoreAtRest() < LITTER_SCORE).toList();
     }
 
     private static List<Draft> finish(List<Draft> drafts, List<SweepFrame> frames, long originMs,

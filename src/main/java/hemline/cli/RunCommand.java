@@ -11,6 +11,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
+import java.util.concurrent.CancellationException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -62,9 +63,13 @@ final class RunCommand implements Callable<Integer> {
         }
         PrintWriter err = spec.commandLine().getErr();
         RunOutcome outcome;
-        try (Interrupts interrupts = new Interrupts();
-                TerminalProgress progress = new TerminalProgress(interrupts::asked)) {
-            outcome = new RunLoop().run(request(), progress);
+        try (Interrupts interrupts = new Interrupts()) {
+            try (TerminalProgress progress = new TerminalProgress(interrupts::asked)) {
+                outcome = new RunLoop().run(request(), progress);
+            } catch (CancellationException stopped) {
+                // Said before the interrupt is let go on: after that the program may end at any moment.
+                return new FailureLine().handleExecutionException(stopped, spec.commandLine(), null);
+            }
         }
         outcome.refused().forEach(refused -> err.println("hemline: " + refused.path() + ": " + refused.reason()));
         outcome.notes().forEach(note -> err.println("note: " + note));
